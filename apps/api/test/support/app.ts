@@ -1,0 +1,57 @@
+import type { Server } from 'node:http';
+import type { AddressInfo } from 'node:net';
+
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import { Test } from '@nestjs/testing';
+import { DataSource, type EntityManager } from 'typeorm';
+
+import { AppModule } from '../../src/app.module.js';
+import { Clock } from '../../src/common/clock.js';
+import { configureApp } from '../../src/configure-app.js';
+import { createClient, type Client } from './client.js';
+import { testConfig } from './config.js';
+import { createTestDatabase } from './database.js';
+import { TestClock } from './test-clock.js';
+
+export interface TestApp {
+  url: string;
+  nest: NestExpressApplication;
+  clock: TestClock;
+  dataSource: DataSource;
+  manager: EntityManager;
+  /** A new browser without cookies. */
+  client(): Client;
+  close(): Promise<void>;
+}
+
+/** The real application on a free port, with a database of its own. `env` overrides single variables. */
+export async function startTestApp(env: Record<string, string> = {}): Promise<TestApp> {
+  const database = await createTestDatabase();
+  const clock = new TestClock();
+  const config = testConfig({ DATABASE_URL: database.url, ...env });
+  const testing = await Test.createTestingModule({ imports: [AppModule.with(config)] })
+    .overrideProvider(Clock)
+    .useValue(clock)
+    .compile();
+  const nest = testing.createNestApplication<NestExpressApplication>({
+    bodyParser: false,
+    rawBody: true,
+    bufferLogs: true,
+  });
+  configureApp(nest);
+  await nest.listen(0, '127.0.0.1');
+  const server = nest.getHttpServer() as Server;
+  const dataSource = nest.get(DataSource);
+  return {
+    url: `http://127.0.0.1:${(server.address() as AddressInfo).port}`,
+    nest,
+    clock,
+    dataSource,
+    manager: dataSource.manager,
+    client: () => createClient(server),
+    close: async () => {
+      await nest.close();
+      await database.drop();
+    },
+  };
+}
