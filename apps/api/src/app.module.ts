@@ -13,6 +13,7 @@ import { ConfigModule } from './config/config.module.js';
 import type { Config } from './config/config.js';
 import { databaseModule } from './database/database.module.js';
 import { HealthModule } from './health/health.module.js';
+import { OutboxModule } from './outbox/outbox.module.js';
 
 @Module({})
 export class AppModule {
@@ -27,6 +28,7 @@ export class AppModule {
         rateLimitModule(),
         CommonModule,
         AccessModule,
+        OutboxModule,
         HealthModule,
       ],
       providers: [

@@ -8,6 +8,8 @@ import { DataSource, type EntityManager } from 'typeorm';
 import { AppModule } from '../../src/app.module.js';
 import { Clock } from '../../src/common/clock.js';
 import { configureApp } from '../../src/configure-app.js';
+import { OutboxRegistry } from '../../src/outbox/outbox-registry.js';
+import { OutboxRunner } from '../../src/outbox/outbox-runner.js';
 import { createClient, type Client } from './client.js';
 import { testConfig } from './config.js';
 import { createTestDatabase } from './database.js';
@@ -21,6 +23,8 @@ export interface TestApp {
   manager: EntityManager;
   /** A new browser without cookies. */
   client(): Client;
+  /** Delivers everything that is due by the test's clock, and what follows from it. `@returns` how many. */
+  drainOutbox(): Promise<number>;
   close(): Promise<void>;
 }
 
@@ -49,6 +53,7 @@ export async function startTestApp(env: Record<string, string> = {}): Promise<Te
     dataSource,
     manager: dataSource.manager,
     client: () => createClient(server),
+    drainOutbox: () => nest.get(OutboxRunner).drain(),
     close: async () => {
       await nest.close();
       await database.drop();
