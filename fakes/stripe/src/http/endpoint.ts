@@ -24,14 +24,16 @@ export function endpoint(fake: FakeContext, handler: Handler): RequestHandler {
   const idempotency = new Idempotency(fake.store);
   return async (req, res) => {
     const requestId = newId('req', 14);
+    // Inside a router req.path is only the rest of the address.
+    const path = `${req.baseUrl}${req.path}`.replace(/\/$/, '');
     const key = req.method === 'POST' ? (req.get('idempotency-key') ?? null) : null;
     const account = req.get('stripe-account') ?? null;
-    const fault = fake.faults.takeApi(req.method, req.path);
+    const fault = fake.faults.takeApi(req.method, path);
     const entry = fake.log.add({
       id: requestId,
       at: new Date().toISOString(),
       method: req.method,
-      path: req.path,
+      path,
       body: req.method === 'GET' ? req.query : (req.body ?? {}),
       idempotencyKey: key,
       account,
@@ -55,7 +57,7 @@ export function endpoint(fake: FakeContext, handler: Handler): RequestHandler {
         if (fault?.fault === 'answer-500-once') return serverError();
         if (fault?.fault === 'answer-429') return tooMany();
         const kept = key
-          ? idempotency.claim(`${account ?? ''}:${key}`, req.path, req.body, requestId)
+          ? idempotency.claim(`${account ?? ''}:${key}`, path, req.body, requestId)
           : undefined;
         if (kept?.answer) {
           entry.replayed = true;
@@ -75,10 +77,10 @@ export function endpoint(fake: FakeContext, handler: Handler): RequestHandler {
 
     function run(): { answer: Answer; saved: boolean } {
       const params = new Params(req.method === 'GET' ? req.query : req.body);
-      const path = (name: string): string => String(req.params[name]);
+      const pathValue = (name: string): string => String(req.params[name]);
       try {
         const done = fake.events.during({ id: requestId, idempotency_key: key }, () =>
-          handler({ params, path, account }),
+          handler({ params, path: pathValue, account }),
         );
         const body = expand(fake, structuredClone(done), params.texts('expand'));
         return { answer: { status: 200, body }, saved: true };
