@@ -1,6 +1,7 @@
 import { Module, type DynamicModule } from '@nestjs/common';
 import { APP_FILTER, APP_GUARD, APP_INTERCEPTOR } from '@nestjs/core';
 
+import { AuthModule } from './auth/auth.module.js';
 import { AccessGuard } from './common/access/access.guard.js';
 import { AccessModule } from './common/access/access.module.js';
 import { CommonModule } from './common/common.module.js';
@@ -13,6 +14,7 @@ import { ConfigModule } from './config/config.module.js';
 import type { Config } from './config/config.js';
 import { databaseModule } from './database/database.module.js';
 import { HealthModule } from './health/health.module.js';
+import { NotificationsModule } from './notifications/notifications.module.js';
 import { OutboxModule } from './outbox/outbox.module.js';
 
 @Module({})
@@ -29,6 +31,8 @@ export class AppModule {
         CommonModule,
         AccessModule,
         OutboxModule,
+        NotificationsModule,
+        AuthModule,
         HealthModule,
       ],
       providers: [

@@ -1,6 +1,7 @@
 import type { Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 
+import { startFakeStripe, type FakeStripe } from '@linkfell/fake-stripe';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { Test } from '@nestjs/testing';
 import { DataSource, type EntityManager } from 'typeorm';
@@ -19,6 +20,8 @@ export interface TestApp {
   url: string;
   nest: NestExpressApplication;
   clock: TestClock;
+  /** The payment service this application talks to; its webhooks come to this application. */
+  stripe: FakeStripe;
   dataSource: DataSource;
   manager: EntityManager;
   /** A new browser without cookies. */
@@ -32,7 +35,8 @@ export interface TestApp {
 export async function startTestApp(env: Record<string, string> = {}): Promise<TestApp> {
   const database = await createTestDatabase();
   const clock = new TestClock();
-  const config = testConfig({ DATABASE_URL: database.url, ...env });
+  const stripe = await startFakeStripe();
+  const config = testConfig({ DATABASE_URL: database.url, STRIPE_API_BASE: stripe.url, ...env });
   const testing = await Test.createTestingModule({ imports: [AppModule.with(config)] })
     .overrideProvider(Clock)
     .useValue(clock)
@@ -45,17 +49,21 @@ export async function startTestApp(env: Record<string, string> = {}): Promise<Te
   configureApp(nest);
   await nest.listen(0, '127.0.0.1');
   const server = nest.getHttpServer() as Server;
+  const url = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
+  stripe.setWebhook(`${url}/api/webhooks/stripe`, config.STRIPE_WEBHOOK_SECRET);
   const dataSource = nest.get(DataSource);
   return {
-    url: `http://127.0.0.1:${(server.address() as AddressInfo).port}`,
+    url,
     nest,
     clock,
+    stripe,
     dataSource,
     manager: dataSource.manager,
     client: () => createClient(server),
     drainOutbox: () => nest.get(OutboxRunner).drain(),
     close: async () => {
       await nest.close();
+      await stripe.close();
       await database.drop();
     },
   };
