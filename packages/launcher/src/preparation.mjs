@@ -6,7 +6,7 @@ import { diskFull, freeMegabytes } from './messages.mjs';
 import { ensureNpmPackages } from './npm-packages.mjs';
 import { inLocal, makeLocalFolders, root } from './paths.mjs';
 import { ensurePostgres, versionOfData } from './postgres/binaries.mjs';
-import { discardCluster, endCluster, openCluster } from './postgres/cluster.mjs';
+import { endCluster, openCluster } from './postgres/cluster.mjs';
 import { dataHome } from './postgres/owner.mjs';
 import { step } from './steps.mjs';
 
@@ -40,16 +40,14 @@ export async function prepareBuild({ web = true } = {}) {
  * @param {string} name of the data folder
  * @param {object} [options]
  * @param {string[]} [options.settings] server settings
- * @param {boolean} [options.fresh] begin with an empty data folder
  * @param {boolean} [options.keep] leave the server running when the command ends
  */
-export async function prepareCluster(name, { settings, fresh = false, keep = false } = {}) {
+export async function prepareCluster(name, { settings, keep = false } = {}) {
   // Asked only once user postgres exists: without it nobody knows what it can reach.
-  const versionOfOurs = () => (fresh ? undefined : versionOfData(join(dataHome().home, name)));
+  const versionOfOurs = () => versionOfData(join(dataHome().home, name));
   const postgres = await step('PostgreSQL', () => ensurePostgres(versionOfOurs));
   return step('Database cluster', async () => {
     const { home, fellBack } = dataHome();
-    if (fresh) await discardCluster(home, name);
     if (!keep) onEnd(() => endCluster(home, name));
     const cluster = await openCluster({ postgres, home, name, settings });
     return {

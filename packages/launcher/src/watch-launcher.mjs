@@ -1,6 +1,8 @@
-// Loaded with --import into the servers that the launcher starts. When the launcher dies without a chance to clean
-// up, its end of the channel closes, and the server ends itself as it would on SIGTERM.
-if (process.channel) {
-  process.on('disconnect', () => process.kill(process.pid, 'SIGTERM'));
-  process.channel.unref();
-}
+// Loaded with --import into the servers that the launcher starts, always with a channel to it. When the launcher
+// dies without a chance to clean up, the channel closes, and the server ends itself as it would on SIGTERM.
+const endOurselves = () => process.kill(process.pid, 'SIGTERM');
+
+process.on('disconnect', endOurselves);
+process.channel?.unref();
+// The launcher may have died before this was loaded.
+if (!process.connected) endOurselves();

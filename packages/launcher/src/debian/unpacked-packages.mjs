@@ -35,7 +35,6 @@ export async function unpackPackages(names, folderName, log) {
   }
   const aptGet = (args) => run('apt-get', ['-q', ...aptOptions(apt), ...args], { log, append: true });
   await aptGet(['update']);
-  await aptGet(['clean']);
   await aptGet(['install', '--download-only', '-y', '--no-install-recommends', ...names]);
 
   const making = `${target}.making`;
@@ -48,7 +47,7 @@ export async function unpackPackages(names, folderName, log) {
   writeFileSync(join(making, '.complete'), `${names.join(' ')}\n`);
   rmSync(target, { recursive: true, force: true });
   renameSync(making, target);
-  await aptGet(['clean']);
+  rmSync(apt, { recursive: true, force: true });
   return target;
 }
 
