@@ -8,6 +8,7 @@ import { CommonModule } from './common/common.module.js';
 import { CsrfGuard } from './common/csrf/csrf.guard.js';
 import { RateLimitGuard, rateLimitModule } from './common/http/rate-limit.js';
 import { loggingModule } from './common/logging/logging.module.js';
+import { OpenApiModule } from './common/openapi/openapi.module.js';
 import { ProblemFilter } from './common/problems/problem.filter.js';
 import { AnswersInterceptor } from './common/validation/answers.js';
 import { ConfigModule } from './config/config.module.js';
@@ -33,6 +34,7 @@ export class AppModule {
         OutboxModule,
         NotificationsModule,
         AuthModule,
+        OpenApiModule,
         HealthModule,
       ],
       providers: [

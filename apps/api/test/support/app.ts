@@ -1,6 +1,7 @@
 import type { Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 
+import { startFakeMail, type FakeMail } from '@linkfell/fake-mail';
 import { startFakeStripe, type FakeStripe } from '@linkfell/fake-stripe';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { Test } from '@nestjs/testing';
@@ -22,6 +23,8 @@ export interface TestApp {
   clock: TestClock;
   /** The payment service this application talks to; its webhooks come to this application. */
   stripe: FakeStripe;
+  /** The mail server this application sends through. */
+  mail: FakeMail;
   dataSource: DataSource;
   manager: EntityManager;
   /** A new browser without cookies. */
@@ -35,8 +38,13 @@ export interface TestApp {
 export async function startTestApp(env: Record<string, string> = {}): Promise<TestApp> {
   const database = await createTestDatabase();
   const clock = new TestClock();
-  const stripe = await startFakeStripe();
-  const config = testConfig({ DATABASE_URL: database.url, STRIPE_API_BASE: stripe.url, ...env });
+  const [stripe, mail] = await Promise.all([startFakeStripe(), startFakeMail()]);
+  const config = testConfig({
+    DATABASE_URL: database.url,
+    STRIPE_API_BASE: stripe.url,
+    SMTP_URL: `smtp://127.0.0.1:${mail.smtpPort}`,
+    ...env,
+  });
   const testing = await Test.createTestingModule({ imports: [AppModule.with(config)] })
     .overrideProvider(Clock)
     .useValue(clock)
@@ -57,13 +65,14 @@ export async function startTestApp(env: Record<string, string> = {}): Promise<Te
     nest,
     clock,
     stripe,
+    mail,
     dataSource,
     manager: dataSource.manager,
     client: () => createClient(server),
     drainOutbox: () => nest.get(OutboxRunner).drain(),
     close: async () => {
       await nest.close();
-      await stripe.close();
+      await Promise.all([stripe.close(), mail.close()]);
       await database.drop();
     },
   };
