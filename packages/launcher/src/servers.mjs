@@ -10,14 +10,14 @@ const watch = pathToFileURL(inRoot('packages/launcher/src/watch-launcher.mjs')).
 
 /**
  * Starts one of our servers with node, its output in `.local/logs/<name>.log`, and ends it when the command ends.
- * Should it end by itself once `settled()` was called, the whole command ends and says why.
+ * Should it end by itself once it was ready, the whole command ends and says why.
  * @param {object} options
- * @param {string[]} [options.nodeArgs] arguments for node itself
+ * @param {boolean} [options.vital] false: it may end by itself
  * @param {boolean} [options.show] show its output on our terminal as well
  */
-export function startServer(name, script, env, { nodeArgs = [], show = false } = {}) {
+export function startServer(name, script, env, { vital = true, show = false } = {}) {
   const log = createWriteStream(inLocal('logs', `${name}.log`));
-  const child = launch(process.execPath, ['--import', watch, ...nodeArgs, inRoot(script)], {
+  const child = launch(process.execPath, ['--import', watch, inRoot(script)], {
     cwd: root,
     env,
     stdio: ['ignore', 'pipe', 'pipe', 'ipc'],
@@ -28,18 +28,19 @@ export function startServer(name, script, env, { nodeArgs = [], show = false } =
   }
   let stopping = false;
   let settled = false;
-  onEnd(() => {
+  const stop = () => {
     stopping = true;
     return endChild(child);
-  });
+  };
+  onEnd(stop);
   void child.ended.then(({ code, signal }) => {
-    if (stopping || !settled) return;
+    if (stopping || !settled || !vital) return;
     console.error(
       `\nThe ${name} ended by itself (${signal ?? `exit status ${code}`}):\n${tail(readLog(name))}`,
     );
     void end(1);
   });
-  return { child, name, settled: () => (settled = true) };
+  return { child, name, stop, settled: () => (settled = true) };
 }
 
 function fault(server) {

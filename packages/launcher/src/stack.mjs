@@ -63,12 +63,11 @@ export async function startStandIns(secrets, apiPort) {
 /**
  * Starts the API and waits until it is ready.
  * @param {object} made values of what this run started
- * @param {object} [options] as for `startServer`
  */
-export const startApi = (made, options) =>
+export const startApi = (made) =>
   step('Linkfell', async () => {
-    const env = { ...process.env, ...apiEnvironment(process.env, made), ...options?.forced };
-    const server = startServer('api', 'apps/api/dist/main.js', env, options);
+    const env = { ...process.env, ...apiEnvironment(process.env, made) };
+    const server = startServer('api', 'apps/api/dist/main.js', env);
     await untilItAnswers(server, `http://127.0.0.1:${env.PORT}/health/ready`);
     return `ready on port ${env.PORT}`;
   });

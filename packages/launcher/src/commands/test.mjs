@@ -46,7 +46,8 @@ async function runOne(runner, env) {
   let exitCode = 0;
   for (const args of runner.argLists ?? [runner.args]) {
     const options = { cwd: inRoot(runner.folder), env, timeoutMs: runner.timeoutMs };
-    exitCode ||= await runOpenly(process.execPath, args(), options);
+    const code = await runOpenly(process.execPath, args(), options);
+    exitCode ||= code;
   }
   const text = existsSync(results) ? readFileSync(results, 'utf8') : undefined;
   return { name: runner.name, ms: Date.now() - began, ...tally(runner.form, text, exitCode) };
@@ -79,7 +80,8 @@ export async function test() {
   const made = await prepareOrExplain(chosen, keep);
   if (!made) return 1;
   const own = Object.fromEntries(Object.entries(process.env).filter(([name]) => !foreign.test(name)));
-  const env = { ...own, ...made, LINKFELL_LONG: long ? '1' : '' };
+  const colour = process.stdout.isTTY ? {} : { NO_COLOR: '1', FORCE_COLOR: '0' };
+  const env = { ...own, ...colour, ...made, LINKFELL_LONG: long ? '1' : '' };
   const outcomes = [];
   for (const runner of chosen) {
     const file = resultsOf(runner.name);

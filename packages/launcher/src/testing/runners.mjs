@@ -9,7 +9,7 @@ const minute = 60_000;
 export const resultsOf = (name) => inLocal('results', `${name}.json`);
 
 /** The entry file of a package's program as the folder `from` sees it. */
-function program(from, packageName, name = packageName) {
+export function program(from, packageName, name = packageName) {
   const require = createRequire(inRoot(from, 'package.json'));
   const manifest = require.resolve(`${packageName}/package.json`);
   const { bin } = require(manifest);
