@@ -1,4 +1,4 @@
-import { chmodSync, existsSync, mkdirSync, writeFileSync } from 'node:fs';
+import { chmodSync, existsSync, mkdirSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { run } from './children.mjs';
 import { aptLine, installOnSystem } from './debian/system-packages.mjs';
@@ -88,7 +88,13 @@ export async function ensureChromium() {
   for (const path of [onSystem, unpacked]) if (existsSync(path)) return { path, note: path };
   try {
     const path = await install();
-    await tryOut(path);
+    try {
+      await tryOut(path);
+    } catch (error) {
+      // Not to be taken for a working one by the next run.
+      rmSync(unpacked, { force: true });
+      throw error;
+    }
     return { path, note: `installed, ${path}` };
   } catch (error) {
     if (saysDiskFull(error)) throw diskFull();

@@ -4,7 +4,7 @@ import { run } from '../children.mjs';
 import { inLocal } from '../paths.mjs';
 
 // Large, and loaded only for code made at run time (JIT, GPU drivers), which we switch off.
-const skipped = /^(libllvm|libz3|locales|libc-l10n|adwaita-icon-theme|systemd)/;
+const skipped = /^(libllvm|libz3|libgl1-mesa-dri|locales|libc-l10n|adwaita-icon-theme|systemd)/;
 
 /**
  * Settings that let apt-get work without root: lists, archives and locks in a folder of ours; the machine's own
@@ -51,14 +51,20 @@ export async function unpackPackages(names, folderName, log) {
   return target;
 }
 
-/** The library folders of an unpacked tree, as LD_LIBRARY_PATH takes them. */
+const holdsLibraries = (folder) => readdirSync(folder).some((name) => /\.so(\.|$)/.test(name));
+
+/** The library folders of an unpacked tree, as LD_LIBRARY_PATH takes them; some packages keep theirs a level down. */
 export function libraryPath(tree) {
   const triplets = { x64: 'x86_64-linux-gnu', arm64: 'aarch64-linux-gnu' };
   const triplet = triplets[process.arch] ?? `${process.arch}-linux-gnu`;
-  const folders = [`usr/lib/${triplet}`, `lib/${triplet}`, `usr/lib/${triplet}/nss`, 'usr/lib', 'lib'];
-  return folders
+  const folders = [`usr/lib/${triplet}`, `lib/${triplet}`, 'usr/lib', 'lib']
     .map((folder) => join(tree, folder))
-    .filter(existsSync)
-    .concat(process.env.LD_LIBRARY_PATH ?? [])
-    .join(':');
+    .filter(existsSync);
+  const below = folders
+    .flatMap((folder) => readdirSync(folder, { withFileTypes: true }).map((entry) => [folder, entry]))
+    .filter(([folder, entry]) => entry.isDirectory() && holdsLibraries(join(folder, entry.name)))
+    .map(([folder, entry]) => join(folder, entry.name));
+  return [...folders, ...below, ...(process.env.LD_LIBRARY_PATH ? [process.env.LD_LIBRARY_PATH] : [])].join(
+    ':',
+  );
 }
