@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import { createTransport, type SendMailOptions } from 'nodemailer';
 import { describe, expect, it, onTestFinished } from 'vitest';
 import { startFakeMail, type FakeMail } from '../src/index.js';
@@ -177,7 +178,13 @@ describe('misbehaving on request', () => {
 describe('the inbox page', () => {
   it('lists the newest first and shows a message with its HTML locked in a frame', async () => {
     const fake = await start();
-    expect(await (await fetch(fake.url)).text()).toContain('No messages yet.');
+    const empty = await fetch(fake.url);
+    const first = await empty.text();
+    expect(first).toContain('No messages yet.');
+    const hash = createHash('sha256')
+      .update(/<style>([^]*)<\/style>/.exec(first)?.[1] ?? '')
+      .digest('base64');
+    expect(empty.headers.get('content-security-policy')).toContain(`style-src 'sha256-${hash}'`);
     await send(fake, { attachments: [{ filename: 'drawing.png', content: PIXEL, cid: 'drawing' }] });
     await send(fake, { subject: '<script>alert(1)</script>' });
     const inbox = await (await fetch(fake.url)).text();

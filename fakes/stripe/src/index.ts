@@ -6,6 +6,7 @@ import { SessionClock } from './checkout/session-clock.js';
 import type { FakeContext } from './context.js';
 import { Faults } from './control/faults.js';
 import { RequestLog } from './http/request-log.js';
+import { finishRefund } from './payments/refund.js';
 import { StateFile } from './store/state-file.js';
 import { Store } from './store/store.js';
 import { Dispatcher } from './webhooks/dispatcher.js';
@@ -71,6 +72,8 @@ export async function startFakeStripe(options: FakeStripeOptions = {}): Promise<
     if (currentSession(fake, session.id)?.status === 'open')
       fake.sessionClock.set(session.id, session.expires_at);
   }
+  for (const refund of store.refunds.all())
+    if (refund.status === 'pending') finishRefund(fake, refund.id, 'later');
 
   return {
     port,
@@ -81,7 +84,7 @@ export async function startFakeStripe(options: FakeStripeOptions = {}): Promise<
     close: async () => {
       fake.sessionClock.clearAll();
       await dispatcher.close();
-      state.flush();
+      state.close();
       const closed = new Promise((resolve) => server.close(resolve));
       server.closeAllConnections();
       await closed;

@@ -30,6 +30,13 @@ describe('a restart with a state file', () => {
     await payByForm(before.fake, paid.id, '4242424242424242');
     const open = await before.stripe.checkout.sessions.create(sessionParams());
     const overdue = await before.stripe.checkout.sessions.create(sessionParams());
+    const slow = await before.stripe.paymentIntents.create({
+      amount: 5000,
+      currency: 'gbp',
+      payment_method: 'pm_card_pendingRefund',
+      confirm: true,
+    });
+    const pending = await before.stripe.refunds.create({ payment_intent: slow.id });
     await before.fake.close();
 
     const text = readFileSync(stateFile, 'utf8');
@@ -38,6 +45,7 @@ describe('a restart with a state file', () => {
     writeFileSync(stateFile, JSON.stringify(saved));
 
     const { fake, stripe } = await start({ stateFile });
+    expect(await stripe.refunds.retrieve(pending.id)).toMatchObject({ status: 'succeeded' });
     const session = await stripe.checkout.sessions.retrieve(paid.id);
     expect(session.status).toBe('complete');
     expect(await stripe.refunds.create({ payment_intent: session.payment_intent as string })).toMatchObject({

@@ -1,19 +1,17 @@
 import type { StoredMessage } from '../message.js';
-import { html, Html } from './html.js';
+import { markup, Html } from './html.js';
 import { STYLE } from './style.js';
 
 const WHEN = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'medium' });
 
 function layout(title: string, body: Html): string {
-  return html`<!doctype html>
+  return markup`<!doctype html>
     <html lang="en-GB">
       <head>
         <meta charset="utf-8" />
         <meta name="viewport" content="width=device-width, initial-scale=1" />
         <title>${title}</title>
-        <style>
-          ${new Html(STYLE)}
-        </style>
+        <style>${new Html(STYLE)}</style>
       </head>
       <body>
         <main>${body}</main>
@@ -25,7 +23,7 @@ export function inboxPage(messages: StoredMessage[]): string {
   const count = messages.length === 1 ? '1 message' : `${messages.length} messages`;
   const rows = messages.map(
     (message) =>
-      html`<li>
+      markup`<li>
         <a href="/messages/${message.id}">${message.subject || 'No subject'}</a>
         <p>To ${message.to.join(', ') || message.envelope.to.join(', ')}</p>
         <p>From ${message.from}, ${WHEN.format(new Date(message.receivedAt))}</p>
@@ -33,13 +31,13 @@ export function inboxPage(messages: StoredMessage[]): string {
   );
   return layout(
     `Test mail: ${count}`,
-    html`<h1>Test mail</h1>
+    markup`<h1>Test mail</h1>
       <p class="soft">Every e-mail that was sent here, the newest first. Nothing leaves this machine.</p>
       <p role="status">${messages.length === 0 ? 'No messages yet.' : `${count}.`}</p>
       <a href="/">Refresh</a>
       ${
         messages.length > 0 &&
-        html`<ul class="inbox">
+        markup`<ul class="inbox">
           ${rows}
         </ul>`
       }`,
@@ -49,32 +47,32 @@ export function inboxPage(messages: StoredMessage[]): string {
 function parts(message: StoredMessage): Html {
   const attachments = message.attachments.map(
     (attachment, index) =>
-      html`<li>
+      markup`<li>
         <a href="/api/messages/${message.id}/attachments/${index}"
           >${attachment.filename ?? `Part ${index + 1}`}</a
         >
         <p>${attachment.contentType}, ${attachment.size} bytes</p>
       </li>`,
   );
-  return html` ${
-      message.html &&
-      html`<h2>HTML</h2>
+  return markup` ${
+    message.html &&
+    markup`<h2>HTML</h2>
         <iframe
           title="HTML part of the message"
           sandbox="allow-popups"
           src="/messages/${message.id}/html"
         ></iframe>`
-    }
+  }
     <h2>Text</h2>
-    ${message.text === null ? html`<p>There is no text part.</p>` : html`<pre>${message.text}</pre>`}
+    ${message.text === null ? markup`<p>There is no text part.</p>` : markup`<pre>${message.text}</pre>`}
     ${message.calendars.map(
       ({ method, text }) =>
-        html`<h2>Calendar${method ? ` (${method})` : ''}</h2>
+        markup`<h2>Calendar${method ? ` (${method})` : ''}</h2>
           <pre>${text}</pre>`,
     )}
     ${
       attachments.length > 0 &&
-      html`<h2>Attachments</h2>
+      markup`<h2>Attachments</h2>
         <ul class="inbox">
           ${attachments}
         </ul>`
@@ -84,7 +82,7 @@ function parts(message: StoredMessage): Html {
 export function messagePage(message: StoredMessage): string {
   return layout(
     message.subject || 'No subject',
-    html`<a href="/">Back to all messages</a>
+    markup`<a href="/">Back to all messages</a>
       <h1>${message.subject || 'No subject'}</h1>
       <p class="soft">
         From ${message.from} to ${message.to.join(', ')}, ${WHEN.format(new Date(message.receivedAt))}
@@ -94,7 +92,7 @@ export function messagePage(message: StoredMessage): string {
       <dl>
         ${message.headers.map(
           ({ name, value }) =>
-            html`<div>
+            markup`<div>
               <dt>${name}</dt>
               <dd>${value}</dd>
             </div>`,
@@ -106,7 +104,7 @@ export function messagePage(message: StoredMessage): string {
 export function noticePage(heading: string): string {
   return layout(
     heading,
-    html`<h1>${heading}</h1>
+    markup`<h1>${heading}</h1>
       <a href="/">Back to all messages</a>`,
   );
 }

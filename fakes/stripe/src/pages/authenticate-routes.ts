@@ -5,7 +5,7 @@ import type { FakeContext } from '../context.js';
 import { formatMoney } from '../objects/money.js';
 import type { StoredIntent } from '../objects/stored.js';
 import { answerAuthentication } from '../payments/confirm.js';
-import { html } from './html.js';
+import { markup } from './html.js';
 import { sendNotice, sendPage } from './layout.js';
 
 /** The address to return to when the intent was made by the API and not by the payment page. */
@@ -46,7 +46,7 @@ export function authenticateRoutes(fake: FakeContext): Router {
       res,
       200,
       'Confirm this test payment',
-      html`<h1>Confirm this test payment</h1>
+      markup`<h1>Confirm this test payment</h1>
         <p class="note">This is a test server. No real money moves.</p>
         <p>
           In real life the card's bank would ask here whether it is you who pays

@@ -18,7 +18,10 @@ function render(value: unknown): string {
   return String(value).replace(/[&<>"']/g, (character) => ESCAPES[character] ?? character);
 }
 
-/** A template whose values are escaped, except markup made by this same tag. */
-export function html(parts: TemplateStringsArray, ...values: unknown[]): Html {
+/**
+ * A template whose values are escaped, except markup made by this same tag. Not named `html`: the formatter would
+ * change the white space inside, and with it the style's hash.
+ */
+export function markup(parts: TemplateStringsArray, ...values: unknown[]): Html {
   return new Html(parts.reduce((text, part, index) => text + render(values[index - 1]) + part));
 }

@@ -1,19 +1,17 @@
 import type { Response } from 'express';
-import { html, Html } from './html.js';
+import { markup, Html } from './html.js';
 import { CONTENT_SECURITY_POLICY, STYLE } from './style.js';
 
 /** Sends a whole page. `title` is what the browser's tab says. */
 export function sendPage(res: Response, status: number, title: string, body: Html): void {
-  const page = html`<!doctype html>
+  const page = markup`<!doctype html>
     <html lang="en-GB">
       <head>
         <meta charset="utf-8" />
         <meta name="viewport" content="width=device-width, initial-scale=1" />
         <meta name="robots" content="noindex" />
         <title>${title}</title>
-        <style>
-          ${new Html(STYLE)}
-        </style>
+        <style>${new Html(STYLE)}</style>
       </head>
       <body>
         <main>${body}</main>
@@ -43,9 +41,9 @@ export function sendNotice(
     res,
     status,
     `${heading} - Test payment page`,
-    html`<h1>${heading}</h1>
+    markup`<h1>${heading}</h1>
       <p>${text}</p>
       <p class="note">This is a test server. No real money moves.</p>
-      ${link && html`<p><a class="button" href="${link.href}">${link.label}</a></p>`}`,
+      ${link && markup`<p><a class="button" href="${link.href}">${link.label}</a></p>`}`,
   );
 }

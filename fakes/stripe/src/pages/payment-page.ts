@@ -2,7 +2,7 @@ import { formatMoney } from '../objects/money.js';
 import type { StoredLine, StoredSession } from '../objects/stored.js';
 import { TEST_CARDS } from '../payments/test-cards.js';
 import type { CardForm, FieldError } from './card-form.js';
-import { html, type Html } from './html.js';
+import { markup, type Html } from './html.js';
 
 export interface PaymentPage {
   session: StoredSession;
@@ -60,18 +60,18 @@ const CARD: Field[] = [
 
 function field(page: PaymentPage, { name, label, hint, autocomplete, numeric, short, type }: Field): Html {
   const error = page.errors.find((one) => one.field === name);
-  return html`<label for="${name}">${label}</label>
+  return markup`<label for="${name}">${label}</label>
     <p class="hint" id="${name}-hint">${hint}</p>
-    ${error && html`<p class="error" id="${name}-error">${error.message}</p>`}
+    ${error && markup`<p class="error" id="${name}-error">${error.message}</p>`}
     <input
       id="${name}"
       name="${name}"
       type="${type ?? 'text'}"
       value="${page.form[name]}"
       autocomplete="${autocomplete}"
-      ${numeric && html`inputmode="numeric"`}
-      ${short && html`class="short"`}
-      ${error && html`aria-invalid="true"`}
+      ${numeric && markup`inputmode="numeric"`}
+      ${short && markup`class="short"`}
+      ${error && markup`aria-invalid="true"`}
       aria-describedby="${name}-hint${error ? ` ${name}-error` : ''}"
       required
     /> `;
@@ -79,15 +79,15 @@ function field(page: PaymentPage, { name, label, hint, autocomplete, numeric, sh
 
 function problems({ errors, declined }: PaymentPage): Html | false {
   if (errors.length > 0) {
-    return html`<div class="bad" role="alert" tabindex="-1" autofocus>
+    return markup`<div class="bad" role="alert" tabindex="-1" autofocus>
       <h2>Please check what you typed</h2>
       <ul>
-        ${errors.map(({ field: name, message }) => html`<li><a href="#${name}">${message}</a></li>`)}
+        ${errors.map(({ field: name, message }) => markup`<li><a href="#${name}">${message}</a></li>`)}
       </ul>
     </div>`;
   }
   if (!declined) return false;
-  return html`<div class="bad" role="alert" tabindex="-1" autofocus>
+  return markup`<div class="bad" role="alert" tabindex="-1" autofocus>
     <h2>The card was not charged</h2>
     <p>${declined} You can try another card.</p>
   </div>`;
@@ -106,13 +106,13 @@ export function paymentBody(page: PaymentPage): Html {
   const total = formatMoney(session.amount_total ?? 0, currency);
   const rows = lines.map(
     (line) =>
-      html`<tr>
+      markup`<tr>
         <th scope="row">${line.description}</th>
         <td>${line.quantity}</td>
         <td class="money">${formatMoney(line.amount_total, currency)}</td>
       </tr>`,
   );
-  return html`<h1>Test payment page</h1>
+  return markup`<h1>Test payment page</h1>
     <p class="note">This is a test server. No real money moves, and no real card belongs here.</p>
     ${problems(page)}
     <table>
@@ -136,7 +136,7 @@ export function paymentBody(page: PaymentPage): Html {
         </tr>
       </tfoot>
     </table>
-    ${email && html`<p>Receipt to ${email}</p>`}
+    ${email && markup`<p>Receipt to ${email}</p>`}
     <h2>Card</h2>
     <form method="post" action="/pay/${session.id}" novalidate>
       ${!email && field(page, EMAIL)} ${CARD.map((one) => field(page, one))}
@@ -144,26 +144,10 @@ export function paymentBody(page: PaymentPage): Html {
     </form>
     ${
       session.cancel_url &&
-      html`<form class="row" method="post" action="/pay/${session.id}/cancel">
+      markup`<form class="row" method="post" action="/pay/${session.id}/cancel">
         <button class="quiet" type="submit">Cancel and go back</button>
       </form>`
     }
     <h2>Test cards</h2>
-    <table>
-      <thead>
-        <tr>
-          <th scope="col">Number</th>
-          <th scope="col">What happens</th>
-        </tr>
-      </thead>
-      <tbody>
-        ${TEST_CARDS.map(
-          ({ number, says }) =>
-            html`<tr>
-              <td><code>${grouped(number)}</code></td>
-              <td>${says}</td>
-            </tr>`,
-        )}
-      </tbody>
-    </table>`;
+<ul class="cards">${TEST_CARDS.map(({ number, says }) => markup`<li><code>${grouped(number)}</code> ${says}</li>`)}</ul>`;
 }

@@ -19,9 +19,13 @@ p { margin: 0 0 12px; }
 .bad p, .bad ul { margin: 0; } .bad ul { padding-left: 20px; }
 table { width: 100%; border-collapse: collapse; margin: 0 0 12px; }
 caption { text-align: left; color: var(--soft); }
-th, td { text-align: left; vertical-align: top; padding: 6px 8px 6px 0; border-bottom: 1px solid var(--hair); font-weight: 400; overflow-wrap: anywhere; }
+th, td { text-align: left; vertical-align: top; padding: 6px 8px 6px 0; border-bottom: 1px solid var(--hair); font-weight: 400; }
+th[scope="row"] { overflow-wrap: anywhere; }
 td:last-child, th:last-child { text-align: right; padding-right: 0; } td.money { white-space: nowrap; }
 tfoot th, tfoot td { font-weight: 700; border-bottom: 0; }
+ul.cards { list-style: none; margin: 0; padding: 0; }
+.cards li { padding: 6px 0; border-bottom: 1px solid var(--hair); }
+.cards code { font-weight: 600; }
 label { display: block; font-weight: 600; margin: 16px 0 2px; }
 .hint { color: var(--soft); font-size: 14px; margin: 0 0 4px; }
 .error { color: var(--bad); font-weight: 600; margin: 0 0 4px; }

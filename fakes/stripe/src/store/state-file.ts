@@ -10,6 +10,7 @@ const SAVE_DELAY_MS = 100;
  */
 export class StateFile {
   private timer: NodeJS.Timeout | undefined;
+  private closed = false;
 
   constructor(
     private readonly store: Store,
@@ -24,12 +25,18 @@ export class StateFile {
 
   /** Writes soon; many changes at once cost one write. */
   touch(): void {
-    if (!this.path || this.timer) return;
+    if (!this.path || this.timer || this.closed) return;
     this.timer = setTimeout(() => this.flush(), SAVE_DELAY_MS);
     this.timer.unref();
   }
 
-  flush(): void {
+  /** Writes for the last time. */
+  close(): void {
+    this.flush();
+    this.closed = true;
+  }
+
+  private flush(): void {
     clearTimeout(this.timer);
     this.timer = undefined;
     if (!this.path) return;
