@@ -3,6 +3,7 @@ import type { AddressInfo } from 'node:net';
 
 import { startFakeMail, type FakeMail } from '@linkfell/fake-mail';
 import { startFakeStripe, type FakeStripe } from '@linkfell/fake-stripe';
+import type { Type } from '@nestjs/common';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { Test } from '@nestjs/testing';
 import { DataSource, type EntityManager } from 'typeorm';
@@ -34,8 +35,21 @@ export interface TestApp {
   close(): Promise<void>;
 }
 
-/** The real application on a free port, with a database of its own. `env` overrides single variables. */
-export async function startTestApp(env: Record<string, string> = {}): Promise<TestApp> {
+export interface TestAppOptions {
+  /** May still add to the application before it listens. */
+  prepare?: (nest: NestExpressApplication) => void;
+  /** Routes of the test's own, beside the real ones. */
+  controllers?: Type[];
+}
+
+/**
+ * The real application on a free port, with a database of its own.
+ * @param env overrides single variables
+ */
+export async function startTestApp(
+  env: Record<string, string> = {},
+  { prepare, controllers = [] }: TestAppOptions = {},
+): Promise<TestApp> {
   const database = await createTestDatabase();
   const clock = new TestClock();
   const [stripe, mail] = await Promise.all([startFakeStripe(), startFakeMail()]);
@@ -45,7 +59,7 @@ export async function startTestApp(env: Record<string, string> = {}): Promise<Te
     SMTP_URL: `smtp://127.0.0.1:${mail.smtpPort}`,
     ...env,
   });
-  const testing = await Test.createTestingModule({ imports: [AppModule.with(config)] })
+  const testing = await Test.createTestingModule({ imports: [AppModule.with(config)], controllers })
     .overrideProvider(Clock)
     .useValue(clock)
     .compile();
@@ -55,6 +69,7 @@ export async function startTestApp(env: Record<string, string> = {}): Promise<Te
     bufferLogs: true,
   });
   configureApp(nest);
+  prepare?.(nest);
   await nest.listen(0, '127.0.0.1');
   const server = nest.getHttpServer() as Server;
   const url = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
