@@ -1,5 +1,6 @@
 import { endAllChildren } from './children.mjs';
 import { explain } from './messages.mjs';
+import { commandOf, parentOf, startOf } from './processes.mjs';
 
 const cleanups = [];
 let ending;
@@ -27,15 +28,23 @@ export function end(exitCode) {
   return ending;
 }
 
-/**
- * npm forwards Ctrl-C but not its own violent death. When we were started through npm and our parent goes away,
- * we end too, so that no stack is left running without a terminal.
- */
-function watchParent(stop) {
-  if (!process.env.npm_lifecycle_event) return;
+/** npm above us: our parent, or its parent when npm started us through a shell. */
+function npmAbove() {
   const parent = process.ppid;
+  const throughShell = /(^|\/)(sh|dash|bash)$/.test(commandOf(parent)[0] ?? '');
+  return throughShell ? parentOf(parent) : parent;
+}
+
+/**
+ * npm forwards Ctrl-C but not its own violent death. When we were started through npm and it goes away, we end too,
+ * so that no stack is left running without a terminal.
+ */
+function watchNpm(stop) {
+  if (!process.env.npm_lifecycle_event) return;
+  const npm = npmAbove();
+  const began = startOf(npm);
   setInterval(() => {
-    if (process.ppid !== parent) stop('parent gone');
+    if (startOf(npm) !== began) stop('npm gone');
   }, 500).unref();
 }
 
@@ -47,13 +56,13 @@ function watchParent(stop) {
 export async function runCommand(title, work) {
   const stop = (reason) => {
     if (ending) return;
-    if (reason !== 'parent gone') console.log('\nStopping.');
+    if (reason.startsWith('SIG')) console.log('\nStopping.');
     void end(quietStop ? 0 : 130);
   };
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => stop(signal));
   // A closed terminal or pipe must not keep us from cleaning up.
-  for (const stream of [process.stdout, process.stderr]) stream.on('error', () => stop('parent gone'));
-  watchParent(stop);
+  for (const stream of [process.stdout, process.stderr]) stream.on('error', () => stop('closed'));
+  watchNpm(stop);
   try {
     await end(await work());
   } catch (error) {

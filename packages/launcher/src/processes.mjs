@@ -1,15 +1,26 @@
-import { readFileSync, readlinkSync } from 'node:fs';
+import { readFileSync } from 'node:fs';
 
-/** When a process began, in clock ticks since boot, as text; undefined when there is none. Tells a reused pid. */
-export function startOf(pid) {
+/** The fields of /proc/PID/stat after the name: state first, then the parent's pid. Undefined for no process. */
+function statOf(pid) {
   try {
     const stat = readFileSync(`/proc/${pid}/stat`, 'utf8');
-    const fields = stat.slice(stat.lastIndexOf(')') + 2).split(' ');
-    return fields[0] === 'Z' ? undefined : fields[19];
+    return stat.slice(stat.lastIndexOf(')') + 2).split(' ');
   } catch {
     return undefined;
   }
 }
+
+/** When a process began, in clock ticks since boot, as text; undefined when there is none. Tells a reused pid. */
+export function startOf(pid) {
+  const fields = statOf(pid);
+  return fields === undefined || fields[0] === 'Z' ? undefined : fields[19];
+}
+
+/** The pid of a process's parent; undefined when there is no such process. */
+export const parentOf = (pid) => {
+  const parent = statOf(pid)?.[1];
+  return parent === undefined ? undefined : Number(parent);
+};
 
 /** The command line of a process as a list; empty when there is none. */
 export function commandOf(pid) {
@@ -22,15 +33,6 @@ export function commandOf(pid) {
 
 /** True when a process with this pid lives. */
 export const isAlive = (pid) => startOf(pid) !== undefined;
-
-/** The folder in which a process runs; undefined when it cannot be read. */
-export function folderOf(pid) {
-  try {
-    return readlinkSync(`/proc/${pid}/cwd`);
-  } catch {
-    return undefined;
-  }
-}
 
 /** Waits until `done()` is true; false when it is not within `ms`. */
 export async function waitUntil(done, ms, everyMs = 50) {

@@ -12,7 +12,7 @@ export const forgetPayments = () => rmSync(stripeState(), { force: true });
 
 async function startStripe(secrets, apiPort) {
   const port = await freePort(4313);
-  const server = startServer('stripe stand-in', 'fakes/stripe/dist/main.js', {
+  const server = startServer('stripe-stand-in', 'fakes/stripe/dist/main.js', {
     ...process.env,
     PORT: String(port),
     API_KEY: secrets.stripeKey,
@@ -27,7 +27,7 @@ async function startStripe(secrets, apiPort) {
 async function startMail() {
   const [http, smtp] = [await freePort(4311), await freePort(4312)];
   const env = { ...process.env, HTTP_PORT: String(http), SMTP_PORT: String(smtp) };
-  const server = startServer('mail stand-in', 'fakes/mail/dist/main.js', env);
+  const server = startServer('mail-stand-in', 'fakes/mail/dist/main.js', env);
   await untilItSaysReady(server);
   return { http, smtp };
 }
