@@ -15,6 +15,7 @@ import { ConfigModule } from './config/config.module.js';
 import type { Config } from './config/config.js';
 import { databaseModule } from './database/database.module.js';
 import { HealthModule } from './health/health.module.js';
+import { HousekeepingModule } from './housekeeping/housekeeping.module.js';
 import { NotificationsModule } from './notifications/notifications.module.js';
 import { OutboxModule } from './outbox/outbox.module.js';
 
@@ -35,6 +36,7 @@ export class AppModule {
         NotificationsModule,
         AuthModule,
         OpenApiModule,
+        HousekeepingModule,
         HealthModule,
       ],
       providers: [

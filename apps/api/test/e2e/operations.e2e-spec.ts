@@ -1,4 +1,22 @@
+import { setTimeout as sleep } from 'node:timers/promises';
+
+import { Controller, Get } from '@nestjs/common';
+
+import { Public } from '../../src/common/access/access.js';
 import { startTestApp, type TestApp } from '../support/app.js';
+
+let begun = 0;
+
+@Controller('slow')
+class SlowController {
+  @Get()
+  @Public()
+  async slow(): Promise<{ done: true }> {
+    begun += 1;
+    await sleep(400);
+    return { done: true };
+  }
+}
 
 describe('operations', () => {
   let app: TestApp;
@@ -43,5 +61,15 @@ describe('operations', () => {
     expect(given.headers['x-request-id']).toBe('proxy-12345');
     const bad = await app.client().get('/health/live').set('X-Request-Id', 'a b <script>');
     expect(bad.headers['x-request-id']).toMatch(/^[0-9a-f-]{36}$/);
+  });
+
+  it('finishes what it has begun when it is told to stop, and takes no more', async () => {
+    const stopping = await startTestApp({ WORKER: 'in-process' }, { controllers: [SlowController] });
+    const slow = stopping.client().get('/api/slow').expect(200, { done: true });
+    const answered = slow.then(() => Date.now());
+    while (begun === 0) await sleep(5);
+    const closed = stopping.close().then(() => Date.now());
+    expect(await answered).toBeLessThanOrEqual(await closed);
+    await expect(fetch(`${stopping.url}/health/live`)).rejects.toThrow();
   });
 });

@@ -11,7 +11,6 @@ import { DataSource, type EntityManager } from 'typeorm';
 import { AppModule } from '../../src/app.module.js';
 import { Clock } from '../../src/common/clock.js';
 import { configureApp } from '../../src/configure-app.js';
-import { OutboxRegistry } from '../../src/outbox/outbox-registry.js';
 import { OutboxRunner } from '../../src/outbox/outbox-runner.js';
 import { createClient, type Client } from './client.js';
 import { testConfig } from './config.js';
