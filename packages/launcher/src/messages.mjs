@@ -27,7 +27,7 @@ export function saysDiskFull(error) {
 /** The fault to show for a full disk. */
 export function diskFull(path = root) {
   return new Fault(
-    `The disk is full: ${freeMegabytes(path)} MB free at ${path}.`,
+    `The disk is full, or nearly: ${freeMegabytes(path)} MB free at ${path}.`,
     'Make some room (about 1.5 GB for a first start) and run the command again; it goes on where it stopped.',
   );
 }

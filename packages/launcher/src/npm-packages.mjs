@@ -2,8 +2,11 @@ import { existsSync, readFileSync, rmSync } from 'node:fs';
 import { run } from './children.mjs';
 import { CommandFailed, Fault } from './fault.mjs';
 import { hashOf, setStamp, stampOf } from './hashes.mjs';
-import { tail } from './messages.mjs';
+import { diskFull, freeMegabytes, tail } from './messages.mjs';
 import { inRoot, root } from './paths.mjs';
+
+// The packages take 500, npm's own store as much again while it fetches.
+const needMegabytes = 800;
 
 const needless = (entry) => entry.optional || entry.peer || entry.os || entry.cpu || entry.libc;
 
@@ -42,6 +45,8 @@ export async function ensureNpmPackages() {
     setStamp('npm', hash);
     return 'up to date';
   }
+  // On a full disk an install script may die in ways that say nothing of the disk.
+  if (freeMegabytes(root) < needMegabytes) throw diskFull();
   setStamp('npm', '');
   // npm puts its own note back last, so without it an interrupted installation is seen as one.
   rmSync(inRoot('node_modules/.package-lock.json'), { force: true });
