@@ -8,7 +8,11 @@ import type { Client } from './client.js';
 /** A browser without an account whose session holds the given grants, as if it had earned them earlier. */
 export async function guestWith(app: TestApp, grants: Partial<GuestGrants>): Promise<Client> {
   const sid = randomUUID();
-  const sess = { cookie: { originalMaxAge: 86_400_000 }, grants: { measureUps: [], orders: [], ...grants } };
+  const sess = {
+    kept: true,
+    cookie: { originalMaxAge: 60 * 86_400_000, path: '/', httpOnly: true, sameSite: 'lax' },
+    grants: { measureUps: [], orders: [], ...grants },
+  };
   await app.dataSource.query(
     `INSERT INTO sessions (sid, sess, expire) VALUES ($1, $2, now() + interval '1 day')`,
     [sid, JSON.stringify(sess)],

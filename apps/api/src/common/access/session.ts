@@ -1,10 +1,8 @@
 import 'express-session';
 
-/** What a guest may open without an account, by id. */
-export interface GuestGrants {
-  measureUps: string[];
-  orders: string[];
-}
+import type { GuestGrants } from './grants.js';
+
+export type { GuestGrants } from './grants.js';
 
 declare module 'express-session' {
   interface SessionData {
@@ -12,5 +10,7 @@ declare module 'express-session' {
     grants?: GuestGrants;
     /** Day of the last visit; a new day prolongs the session. */
     seenOn?: string;
+    /** Set by the store once it is in the database. */
+    kept?: boolean;
   }
 }
