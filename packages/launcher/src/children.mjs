@@ -46,6 +46,13 @@ export async function endChild(child, graceMs = 10_000) {
 /** Ends all children that still live. */
 export const endAllChildren = () => Promise.all([...living].map((child) => endChild(child)));
 
+/** An environment in which programs print no colours. */
+export function colourless(env = process.env) {
+  const plain = { ...env, NO_COLOR: '1' };
+  delete plain.FORCE_COLOR;
+  return plain;
+}
+
 /**
  * Runs a command to its end, its output in `.local/logs/<log>.log` only; `input` goes to its standard input.
  * @returns {Promise<string>} the last 64 KB of its output
@@ -56,7 +63,7 @@ export async function run(command, args, { log, timeoutMs, append = false, input
   const file = logPath ? openSync(logPath, append ? 'a' : 'w') : undefined;
   let output = '';
   const stdio = options.stdio ?? [input === undefined ? 'ignore' : 'pipe', 'pipe', 'pipe'];
-  const child = launch(command, args, { ...options, stdio });
+  const child = launch(command, args, { ...options, env: colourless(options.env), stdio });
   child.stdin?.on('error', () => undefined).end(input);
   const keep = (chunk) => {
     if (file !== undefined) writeSync(file, chunk);

@@ -1,7 +1,7 @@
 import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs';
 import { parseArgs } from 'node:util';
 import { ensureChromium } from '../chromium.mjs';
-import { runOpenly } from '../children.mjs';
+import { colourless, runOpenly } from '../children.mjs';
 import { Fault } from '../fault.mjs';
 import { explain } from '../messages.mjs';
 import { inLocal, inRoot } from '../paths.mjs';
@@ -80,8 +80,7 @@ export async function test() {
   const made = await prepareOrExplain(chosen, keep);
   if (!made) return 1;
   const own = Object.fromEntries(Object.entries(process.env).filter(([name]) => !foreign.test(name)));
-  const colour = process.stdout.isTTY ? {} : { NO_COLOR: '1', FORCE_COLOR: '0' };
-  const env = { ...own, ...colour, ...made, LINKFELL_LONG: long ? '1' : '' };
+  const env = { ...(process.stdout.isTTY ? own : colourless(own)), ...made, LINKFELL_LONG: long ? '1' : '' };
   const outcomes = [];
   for (const runner of chosen) {
     const file = resultsOf(runner.name);
