@@ -8,6 +8,14 @@ import { inLocal, inRoot, root } from './paths.mjs';
 
 const watch = pathToFileURL(inRoot('packages/launcher/src/watch-launcher.mjs')).href;
 
+/** Launches node with these arguments so that it ends when the launcher is killed. */
+export const launchWatching = (args, options) =>
+  launch(process.execPath, ['--import', watch, ...args], {
+    cwd: root,
+    stdio: ['ignore', 'pipe', 'pipe', 'ipc'],
+    ...options,
+  });
+
 /**
  * Starts one of our servers with node, its output in `.local/logs/<name>.log`, and ends it when the command ends.
  * Should it end by itself once it was ready, the whole command ends and says why.
@@ -17,11 +25,7 @@ const watch = pathToFileURL(inRoot('packages/launcher/src/watch-launcher.mjs')).
  */
 export function startServer(name, script, env, { vital = true, show = false } = {}) {
   const log = createWriteStream(inLocal('logs', `${name}.log`));
-  const child = launch(process.execPath, ['--import', watch, inRoot(script)], {
-    cwd: root,
-    env,
-    stdio: ['ignore', 'pipe', 'pipe', 'ipc'],
-  });
+  const child = launchWatching([inRoot(script)], { env });
   for (const stream of [child.stdout, child.stderr]) {
     stream.on('data', (chunk) => log.write(chunk));
     if (show) stream.pipe(process.stdout, { end: false });

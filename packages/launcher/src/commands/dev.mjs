@@ -1,11 +1,10 @@
 import { tsc } from '../build.mjs';
-import { launch } from '../children.mjs';
 import { greeting } from '../greeting.mjs';
 import { setQuietStop } from '../lifecycle.mjs';
-import { inRoot, root } from '../paths.mjs';
+import { inRoot } from '../paths.mjs';
 import { freePort } from '../ports.mjs';
 import { prepareBuild, prepareFolders, preparePackages } from '../preparation.mjs';
-import { startServer, untilItAnswers } from '../servers.mjs';
+import { launchWatching, startServer, untilItAnswers } from '../servers.mjs';
 import { apiEnvironment, loadEnvFile, portIn } from '../settings.mjs';
 import { startStandIns } from '../stack.mjs';
 import { program } from '../testing/runners.mjs';
@@ -29,7 +28,7 @@ function restartingApi(env) {
 }
 
 function watchCompiler(onCompiled) {
-  const child = launch(process.execPath, [tsc, '-b', '--watch', '--preserveWatchOutput'], { cwd: root });
+  const child = launchWatching([tsc, '-b', '--watch', '--preserveWatchOutput']);
   let first = true;
   child.stdout.on('data', (chunk) => {
     process.stdout.write(chunk);
@@ -42,10 +41,10 @@ function watchCompiler(onCompiled) {
 
 function startVite(port, apiUrl) {
   const args = [program('apps/web', 'vite'), '--port', String(port), '--strictPort'];
-  launch(process.execPath, args, {
+  launchWatching(args, {
     cwd: inRoot('apps/web'),
     env: { ...process.env, API_URL: apiUrl },
-    stdio: ['ignore', 'inherit', 'inherit'],
+    stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
   });
 }
 
