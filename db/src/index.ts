@@ -1,4 +1,1 @@
-import { CreateCore1764576000000 } from './migrations/1764576000000-CreateCore.js';
-
-/** All migrations, oldest first. Add a new class at the end; never edit one that has landed. */
-export const migrations = [CreateCore1764576000000];
+export { migrations } from './migrations/all.js';

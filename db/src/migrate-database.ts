@@ -1,7 +1,7 @@
 import { runMigrations } from 'graphile-worker';
 import { DataSource } from 'typeorm';
 
-import { migrations } from './index.js';
+import { migrations } from './migrations/all.js';
 
 /**
  * Brings a database up to date: our own migrations, then the job queue's schema.
