@@ -7,7 +7,11 @@ describe('VAT inside a price', () => {
     [1200, 2000, 200],
     [43_800, 2000, 7300],
     [1, 2000, 0],
-    [3, 2000, 1], // exactly half a penny is rounded up
+    [3, 2000, 0], // a net of exactly 2.5 is rounded up
+    // Python's decimal, half up on the net:
+    [11_900, 1900, 1900],
+    [999, 2000, 166],
+    [1, 2100, 0],
     [999, 0, 0],
     [10_500, 500, 500],
   ])('of %i at %i basis points is %i', (total, rate, vat) => expect(vatWithin(total, rate)).toBe(vat));

@@ -18,7 +18,6 @@ const { rows } = JSON.parse(
 describe('great-circle distance against values of 50 digits', () => {
   it.each(rows)('$name', ({ lat1, lon1, lat2, lon2, metres }) => {
     const km = greatCircleKm({ latitude: lat1, longitude: lon1 }, { latitude: lat2, longitude: lon2 });
-    // The plain haversine loses digits near the antipode: 0.1 m there, a millimetre elsewhere.
-    expect(Math.abs(km * 1000 - metres)).toBeLessThan(metres > 2e7 ? 0.1 : 1e-3);
+    expect(Math.abs(km * 1000 - metres)).toBeLessThan(1e-3);
   });
 });
