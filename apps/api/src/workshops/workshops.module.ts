@@ -1,0 +1,6 @@
+import { Module } from '@nestjs/common';
+
+import { WorkshopsService } from './workshops.service.js';
+
+@Module({ providers: [WorkshopsService], exports: [WorkshopsService] })
+export class WorkshopsModule {}
