@@ -1,2 +1,11 @@
 export * from './facts.js';
 export * from './answers.js';
+export * from './judge.js';
+export * from './instead.js';
+export * from './sizing/sizes.js';
+export * from './sizing/resolve-size.js';
+export * from './messages/tell.js';
+export { reasonCodes, type ReasonCode } from './messages/reason-codes.js';
+export { torqueSlipRange } from './springs/torque.js';
+export * from './units/factors.js';
+export * from './units/parse.js';

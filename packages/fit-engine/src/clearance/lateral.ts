@@ -1,0 +1,6 @@
+/** Free on each side across the tunnel, mm (common practice). */
+const sideMm = 2;
+
+/** Whether a can or coil has its room across; exactly 2 mm each side passes, whatever binary fractions say. */
+export const lateralOk = (diameterMm: number, tunnelMm: number): boolean =>
+  Math.round((tunnelMm - diameterMm - 2 * sideMm) * 1000) >= 0;

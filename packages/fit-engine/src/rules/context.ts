@@ -1,0 +1,74 @@
+import type { AnswerKind, AskNeed, CheckAnswer, CheckId, Figure, PartNeed, WorkNeed } from '../answers.js';
+import type { FitQuestion, FrameEnd, SheetEntry, ShockMount, Source } from '../facts.js';
+import type { SizeResult } from '../sizing/resolve-size.js';
+import type { ReasonCode } from '../messages/reason-codes.js';
+
+/** What all shocks of one judgement share. */
+export interface Shared {
+  size: SizeResult;
+}
+
+/** One way of putting this shock in: against one entry of the sheet, one way round. */
+export interface Trial extends FitQuestion {
+  shared: Shared;
+  entry: SheetEntry;
+  wayRound: 'body-to-frame' | 'body-to-link';
+  /** Look at the costly checks even if a cheap one has failed. */
+  full: boolean;
+}
+
+export interface TrialEnd {
+  end: 'frame' | 'link';
+  frame: FrameEnd | null;
+  shock: ShockMount;
+}
+
+/** The two ends as this way round brings them together. */
+export function endsOf({ entry, shock, wayRound }: Trial): readonly [TrialEnd, TrialEnd] {
+  const bodyAtFrame = wayRound === 'body-to-frame';
+  return [
+    { end: 'frame', frame: entry.frameEnd, shock: bodyAtFrame ? shock.bodyEnd : shock.shaftEnd },
+    { end: 'link', frame: entry.linkEnd, shock: bodyAtFrame ? shock.shaftEnd : shock.bodyEnd },
+  ];
+}
+
+interface Extras {
+  figures?: readonly (Figure | null)[];
+  remark?: boolean;
+  parts?: readonly PartNeed[];
+  work?: readonly WorkNeed[];
+  ask?: readonly AskNeed[];
+}
+
+/** Builds an answer; figures that are null are left out. */
+export const answer = (
+  check: CheckId,
+  kind: AnswerKind,
+  code: ReasonCode,
+  { figures = [], remark = false, parts = [], work = [], ask = [] }: Extras = {},
+): CheckAnswer => ({
+  check,
+  answer: kind,
+  code,
+  figures: figures.filter((figure) => figure !== null),
+  remark,
+  parts,
+  work,
+  ask,
+});
+
+export const figure = (
+  key: string,
+  value: number | string | null,
+  unit: Figure['unit'],
+  source: Source,
+): Figure => ({ key, value, unit, source });
+
+export const riderSaid: Source = { kind: 'rider', label: 'Your answer', date: null };
+export const computed: Source = { kind: 'computed', label: 'Computed', date: null };
+export const practice: Source = { kind: 'practice', label: 'Common practice', date: null };
+
+const rank: Record<AnswerKind, number> = { pass: 0, work: 1, unknown: 2, fail: 3 };
+export const rankOf = (kind: AnswerKind): number => rank[kind];
+export const worst = (answers: readonly CheckAnswer[]): AnswerKind =>
+  answers.reduce<AnswerKind>((bad, { answer: kind }) => (rank[kind] > rank[bad] ? kind : bad), 'pass');

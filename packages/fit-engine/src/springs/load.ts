@@ -1,0 +1,38 @@
+import type { RidingStyle } from '../facts.js';
+import { g0 } from '../units/factors.js';
+
+export interface LoadShares {
+  /** Part of the weight on the rear wheel; 0.60, between 0.50 and 0.70 (common practice). */
+  rearShare: number;
+  /** Part of the bike's mass that the suspension carries; 0.6, between 0.5 and 0.75 (common practice). */
+  sprungShare: number;
+}
+export const usualShares: LoadShares = { rearShare: 0.6, sprungShare: 0.6 };
+
+/** Static vertical load on the rear wheel, N. */
+export const wheelLoadN = (riderKg: number, kitKg: number, bikeKg: number, shares = usualShares): number =>
+  g0 * (riderKg + kitKg + shares.sprungShare * bikeKg) * shares.rearShare;
+
+export interface SagWindow {
+  lowPercent: number;
+  highPercent: number;
+  midPercent: number;
+}
+
+/** Sag at the shock by style (common practice). */
+const windows: Record<RidingStyle, readonly [number, number]> = {
+  'cross-country': [20, 25],
+  trail: [25, 30],
+  enduro: [28, 33],
+  downhill: [30, 35],
+};
+
+/** The sag to aim for, % of stroke at the shock; a printed target wins and means +/- 2 points. */
+export function sagWindow(style: RidingStyle | null, printedPercent: number | null): SagWindow | null {
+  if (printedPercent !== null) {
+    return { lowPercent: printedPercent - 2, highPercent: printedPercent + 2, midPercent: printedPercent };
+  }
+  if (!style) return null;
+  const [lowPercent, highPercent] = windows[style];
+  return { lowPercent, highPercent, midPercent: (lowPercent + highPercent) / 2 };
+}
