@@ -1,0 +1,147 @@
+import type { MatchDetail, MatchesQuery, MatchesView, MatchRow, Verdict } from '@linkfell/contracts';
+import { sagText } from './sag-text.js';
+import { Injectable } from '@nestjs/common';
+import { DataSource } from 'typeorm';
+
+import { frameEndWords, mountWord } from '../frames/mount-words.js';
+import { frameName } from '../frames/sheet.js';
+import { known } from '../measure-ups/answers.js';
+import type { OpenMeasureUp } from '../measure-ups/measure-ups.service.js';
+import { presentDrawing, sizeResult } from '../measure-ups/size-view.js';
+import { Town } from '../organisations/town.entity.js';
+import { FitCostService, type FitCost } from '../plans/fit-cost.service.js';
+import type { Place } from '../workshops/great-circle.js';
+import { itemsOf, JudgingService, workOf, type Judged } from './judging.service.js';
+import { matchDetail, matchRow } from './match-row.js';
+
+const verdictOrder: readonly Verdict[] = [
+  'bolts-straight-in',
+  'fits-with-work',
+  'needs-an-answer',
+  'wont-fit',
+];
+const noCost: FitCost = { partsMinor: null, selfFitMinor: null, fittedMinor: null, earliest: null };
+
+/** The cheapest way to have it: fitted or, where allowed, by oneself. */
+const allIn = ({ price }: MatchRow): number =>
+  price.fittedMinor ?? price.partsMinor ?? Number.MAX_SAFE_INTEGER;
+
+const orders: Record<MatchesQuery['order'], (a: MatchRow, b: MatchRow) => number> = {
+  cheapest: (a, b) => allIn(a) - allIn(b),
+  earliest: (a, b) => (a.earliest?.day ?? '9999').localeCompare(b.earliest?.day ?? '9999'),
+  lightest: (a, b) => a.massG - b.massG,
+};
+
+@Injectable()
+export class MatchesService {
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly judging: JudgingService,
+    private readonly costs: FitCostService,
+  ) {}
+
+  /** The fitting sheet: every size on sale judged, narrowed by the sentence, grouped by verdict. */
+  async matches(measureUpId: string, query: MatchesQuery): Promise<MatchesView> {
+    const { open, judged } = await this.judging.judgeAll(measureUpId);
+    const applied = appliedTo(open, query);
+    const counts = Object.fromEntries(verdictOrder.map((verdict) => [verdict, 0])) as Record<Verdict, number>;
+    for (const { judgement } of judged) counts[judgement.verdict] += 1;
+
+    const wished = judged.filter((one) => wanted(one, applied));
+    const shown = wished.filter(
+      ({ judgement }) => judgement.verdict !== 'wont-fit' || applied.wontFit === 'shown',
+    );
+    const priced = shown.filter(({ judgement }) => judgement.verdict !== 'wont-fit');
+    const costs = await this.costs.quoteMany(priced.map(requestOf), await this.placeOf(open));
+    const rows = shown.map((one) => matchRow(one, costs.get(one.shock.sizeId) ?? noCost));
+    const affordable = rows.filter(
+      (row) => applied.maxMinor === null || row.verdict === 'wont-fit' || allIn(row) <= applied.maxMinor,
+    );
+    const hiddenRefusals = applied.wontFit === 'hidden' ? counts['wont-fit'] : 0;
+    return {
+      measureUpId,
+      revision: open.revision,
+      title: open.side.frame.name,
+      sheetNote: sheetNote(open),
+      own: own(open),
+      rider: { kg: riderKg(open), sagWindow: sagText(open.side) },
+      applied,
+      counts,
+      leftOut: judged.length - affordable.length - hiddenRefusals,
+      rows: affordable.sort(
+        (a, b) =>
+          verdictOrder.indexOf(a.verdict) - verdictOrder.indexOf(b.verdict) ||
+          orders[applied.order](a, b) ||
+          a.sizeId.localeCompare(b.sizeId),
+      ),
+    };
+  }
+
+  async detail(measureUpId: string, sizeId: string): Promise<MatchDetail> {
+    const one = await this.judging.judgeOne(measureUpId, sizeId);
+    const costs =
+      one.judgement.verdict === 'wont-fit'
+        ? new Map<string, FitCost>()
+        : await this.costs.quoteMany([requestOf(one)], await this.placeOf(one.open));
+    return matchDetail(one, costs.get(sizeId) ?? noCost);
+  }
+
+  /** Where the rider is, for distances; null while not told. */
+  async placeOf(open: OpenMeasureUp): Promise<Place | null> {
+    const place = known(open.answers, 'place');
+    return place && this.dataSource.manager.findOneBy(Town, { id: place.townId });
+  }
+}
+
+const requestOf = (one: Judged) => ({
+  key: one.shock.sizeId,
+  items: itemsOf(one),
+  work: workOf(one.judgement),
+  selfFitAllowed: one.judgement.selfFitAllowed,
+});
+
+function appliedTo(open: OpenMeasureUp, query: MatchesQuery): MatchesView['applied'] {
+  const { rider } = open.side;
+  return {
+    spring: query.spring ?? rider.springWish,
+    reservoir: query.reservoir ?? rider.reservoirWish,
+    maxMinor: query.maxMinor ?? known(open.answers, 'budget')?.maxMinor ?? null,
+    order: query.order,
+    wontFit: query.wontFit,
+  };
+}
+
+function wanted({ shock }: Judged, { spring, reservoir }: MatchesView['applied']): boolean {
+  if (spring !== 'either' && shock.spring.kind !== spring) return false;
+  return reservoir === 'either' || (shock.reservoir !== null) === (reservoir === 'with');
+}
+
+const riderKg = ({ side: { rider } }: OpenMeasureUp): number | null =>
+  rider.riderKg === null ? null : rider.riderKg + (rider.kitKg ?? 0);
+
+function sheetNote({ sheet, side }: OpenMeasureUp): string {
+  if (!sheet)
+    return `${side.frame.name} is not in our list; its size comes from your present shock, not from its maker.`;
+  const listed = [...new Set(sheet.entries.map((entry) => entry.sizeKey))].join(' and ');
+  return `The frame sheet of the ${frameName(sheet)}, version ${sheet.version}, lists ${listed}.`;
+}
+
+function own(open: OpenMeasureUp): MatchesView['own'] {
+  const { side, sheet } = open;
+  const size = sizeResult(side, sheet);
+  const drawing = presentDrawing(side, size);
+  if (!drawing) return null;
+  const { present } = side;
+  const word = (kind: typeof present.bodyEndKind): string => (kind ? mountWord(kind) : 'not known');
+  const entry = side.frame.entries[0];
+  return {
+    drawing,
+    sizeText: size.sizeKey ?? `${drawing.eyeToEyeMm} x ${drawing.strokeMm ?? '?'}`,
+    mounts:
+      present.bodyEndKind || present.shaftEndKind
+        ? `${word(present.bodyEndKind)} / ${word(present.shaftEndKind)}`
+        : `${frameEndWords(entry?.frameEnd ?? null)} / ${frameEndWords(entry?.linkEnd ?? null)}`,
+    spring: present.spring ?? 'not known',
+    remote: present.remoteAction?.replaceAll('-', ' ') ?? 'not known',
+  };
+}
