@@ -1,6 +1,4 @@
-import type { Judgement } from '@linkfell/fit-engine';
+import type { JobSnapshot } from '../plans/prepared-order.js';
 
 /** What is kept with an order of the judgement it was sold on, so that later sheet versions change nothing sold. */
-export interface OrderJob {
-  judgement: Judgement;
-}
+export type OrderJob = JobSnapshot & { title: string; shockName: string };
