@@ -10,7 +10,7 @@ import { pressureCheck } from './rules/pressure.js';
 import { remoteCheck } from './rules/remote.js';
 import { reservoirCheck } from './rules/reservoir.js';
 import { riderWeightCheck } from './rules/rider-weight.js';
-import { sizeChecks } from './rules/size.js';
+import { entryApplies, sizeChecks } from './rules/size.js';
 import { springRateCheck } from './rules/spring-rate.js';
 import { answer, rankOf, worst, type Shared, type Trial } from './rules/context.js';
 import { resolveSize } from './sizing/resolve-size.js';
@@ -77,7 +77,10 @@ function better(a: Outcome, b: Outcome): Outcome {
 
 function judgeWith(question: FitQuestion, shared: Shared, full: boolean): Judgement {
   const ways = ['body-to-frame', 'body-to-link'] as const;
-  const outcomes = question.frame.entries.flatMap((entry) =>
+  const { entries } = question.frame;
+  // An entry for another year, size or chip has no say while there is one for this bike.
+  const applying = entries.filter((entry) => entryApplies(question, entry) !== 'no');
+  const outcomes = (applying.length > 0 ? applying : entries).flatMap((entry) =>
     ways.map((wayRound) => runTrial({ ...question, shared, entry, wayRound, full })),
   );
   const [first, ...others] = outcomes;

@@ -32,8 +32,8 @@ export const sentences = {
   'mounts-need-a-bearing-eye': 'The frame needs a bearing eye where this shock has something else.',
   'mounts-pin-differs': 'The frame’s pin and the eye have different diameters, and no kit helps there.',
   'mounts-bearing-differs': 'The bearing eye has another bolt or width than the frame.',
-  'mounts-agree-by-your-reading': 'The mounts agree by your reading, to be confirmed at fitting.',
-  'mounts-reading-too-coarse': 'Your reading of the mount is too coarse to tell; use a caliper.',
+  'mounts-agree-by-your-reading': 'The mounts agree by a measured reading, to be confirmed at fitting.',
+  'mounts-reading-too-coarse': 'The reading of the mount is too coarse to tell; use a caliper.',
   'mounts-not-measured': 'A figure of the frame’s mount is missing.',
   'mounts-not-known': 'One of the frame’s mounts is not known.',
   'hardware-none-needed': 'No mounting hardware is needed.',
@@ -85,6 +85,8 @@ export const sentences = {
     'The reservoir comes within {computed.clearance} of the {computed.tightestPart}; 3 mm must stay free.',
   'reservoir-word-against-drawing':
     'The maker says it fits, our drawing leaves {computed.clearance} to the {computed.tightestPart}: somebody has to look.',
+  'reservoir-movement-not-drawn':
+    'A part moves near the shock in a way that nobody has drawn, so the room cannot be told.',
   'reservoir-stated': 'The frame’s maker says that a reservoir fits.',
   'reservoir-room-measured': 'It fits the room you measured.',
   'reservoir-room-too-small': 'It is larger than the room you measured.',

@@ -67,6 +67,16 @@ export function reservoirCheck(trial: Trial): ReservoirAnswer {
     };
   }
   const positionDeg = positions[0] ?? null;
+  // A part that moves in a way nobody has drawn may meet the reservoir, whatever is said.
+  if (frame.room?.outlines.some((part) => part.moves && !part.poses)) {
+    return {
+      answer: answer('reservoir', 'unknown', 'reservoir-movement-not-drawn', {
+        figures: [said],
+        ask: [askMaker],
+      }),
+      positionDeg,
+    };
+  }
   if (word)
     return { answer: answer('reservoir', 'pass', 'reservoir-stated', { figures: [said] }), positionDeg };
   return { answer: byRidersRoom(trial), positionDeg };

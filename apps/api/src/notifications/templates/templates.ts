@@ -1,3 +1,15 @@
+import {
+  bookingAccepted,
+  bookingCancelled,
+  bookingOpenAgain,
+  fitted,
+  orderPaid,
+  orderRefunded,
+  orderReleased,
+  parcelSent,
+  shopOrder,
+  workshopRequest,
+} from './order-mails.js';
 import { passwordChanged } from './password-changed.js';
 import { passwordReset } from './password-reset.js';
 
@@ -5,6 +17,16 @@ import { passwordReset } from './password-reset.js';
 export const templates = {
   'password-changed': passwordChanged,
   'password-reset': passwordReset,
+  'order-paid': orderPaid,
+  'order-released': orderReleased,
+  'order-refunded': orderRefunded,
+  'shop-order': shopOrder,
+  'workshop-request': workshopRequest,
+  'booking-accepted': bookingAccepted,
+  'booking-open-again': bookingOpenAgain,
+  'booking-cancelled': bookingCancelled,
+  'parcel-sent': parcelSent,
+  fitted,
 } as const;
 
 export type TemplateName = keyof typeof templates;

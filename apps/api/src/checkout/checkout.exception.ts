@@ -1,0 +1,7 @@
+import { problems } from '../common/problems/problem.exception.js';
+
+export class CheckoutException extends problems({
+  'price-changed': { status: 409, title: 'The price has changed' },
+  'stock-gone': { status: 409, title: 'Somebody was quicker' },
+  'slot-taken': { status: 409, title: 'That date has just been taken' },
+}) {}
