@@ -18,6 +18,15 @@ import { HealthModule } from './health/health.module.js';
 import { HousekeepingModule } from './housekeeping/housekeeping.module.js';
 import { NotificationsModule } from './notifications/notifications.module.js';
 import { OutboxModule } from './outbox/outbox.module.js';
+import { CheckoutModule } from './checkout/checkout.module.js';
+import { BookingsModule } from './fitting-bookings/bookings.module.js';
+import { FramesModule } from './frames/frames.module.js';
+import { MatchesModule } from './matches/matches.module.js';
+import { MeasureUpsModule } from './measure-ups/measure-ups.module.js';
+import { OrdersModule } from './orders/orders.module.js';
+import { PaymentsModule } from './payments/payments.module.js';
+import { PlansModule } from './plans/plans.module.js';
+import { StockModule } from './stock/stock.module.js';
 
 @Module({})
 export class AppModule {
@@ -35,6 +44,15 @@ export class AppModule {
         OutboxModule,
         NotificationsModule,
         AuthModule,
+        FramesModule,
+        MeasureUpsModule,
+        MatchesModule,
+        PlansModule,
+        CheckoutModule,
+        PaymentsModule,
+        OrdersModule,
+        BookingsModule,
+        StockModule,
         OpenApiModule,
         HousekeepingModule,
         HealthModule,

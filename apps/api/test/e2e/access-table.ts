@@ -51,4 +51,45 @@ export const accessTable: Record<string, Row> = {
   'POST /api/auth/sign-out': signedIn,
   'POST /api/auth/password-reset': everybody,
   'POST /api/auth/password-reset/confirm': everybody,
+
+  'GET /api/frames': everybody,
+  'GET /api/frames/:frameId': everybody,
+  'GET /api/towns': everybody,
+
+  'POST /api/measure-ups': everybody,
+  'POST /api/measure-ups/open': everybody,
+  'GET /api/measure-ups/:id': measureUpHolders,
+  'PUT /api/measure-ups/:id/answers/:question': measureUpHolders,
+  'DELETE /api/measure-ups/:id/answers/:question': measureUpHolders,
+  'POST /api/measure-ups/:id/links': measureUpHolders,
+  'DELETE /api/measure-ups/:id/links': measureUpHolders,
+  'GET /api/measure-ups/:id/matches': measureUpHolders,
+  'GET /api/measure-ups/:id/matches/:sizeId': measureUpHolders,
+  'POST /api/measure-ups/:id/plans': measureUpHolders,
+
+  'GET /api/plans/:id': measureUpHolders,
+  'PUT /api/plans/:id/choices': measureUpHolders,
+  'POST /api/plans/:id/checkout': measureUpHolders,
+
+  'POST /api/webhooks/stripe': everybody,
+
+  'POST /api/orders/find': everybody,
+  'GET /api/orders/:reference': orderHolders,
+  'GET /api/orders/:reference/workshops': orderHolders,
+  'POST /api/orders/:reference/cancel-payment': orderHolders,
+  'POST /api/orders/:reference/workshop': orderHolders,
+  'POST /api/orders/:reference/self-fit': orderHolders,
+  'POST /api/orders/:reference/refund': orderHolders,
+
+  'GET /api/organisations/:orgId/bookings': workshopMembers,
+  'GET /api/organisations/:orgId/bookings/:bookingId': workshopMembers,
+  'POST /api/organisations/:orgId/bookings/:bookingId/accept': workshopMembers,
+  'POST /api/organisations/:orgId/bookings/:bookingId/decline': workshopMembers,
+  'PUT /api/organisations/:orgId/bookings/:bookingId/record': workshopMembers,
+  'POST /api/organisations/:orgId/bookings/:bookingId/fitted': workshopMembers,
+
+  'GET /api/organisations/:orgId/stock': shopMembers,
+  'PATCH /api/organisations/:orgId/stock/:listingId': shopMembers,
+  'GET /api/organisations/:orgId/parcels': shopMembers,
+  'POST /api/organisations/:orgId/parcels/:parcelId/sent': shopMembers,
 };
