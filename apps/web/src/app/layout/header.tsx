@@ -1,0 +1,71 @@
+import { chakra } from '@chakra-ui/react';
+import { Link, NavLink } from 'react-router-dom';
+import { Mark } from '../../components/mark';
+import { ColourModeSwitch } from './colour-mode-switch';
+
+const Home = chakra(Link, {
+  base: {
+    display: 'inline-flex',
+    alignItems: 'center',
+    gap: '2',
+    minHeight: 'target',
+    marginRight: 'auto',
+    fontSize: 'xl',
+    fontWeight: 'heavy',
+    letterSpacing: '-0.02em',
+    color: 'ink',
+  },
+});
+
+const Item = chakra(NavLink, {
+  base: {
+    display: 'inline-flex',
+    alignItems: 'center',
+    minHeight: 'target',
+    paddingInline: '1',
+    color: 'slate',
+    fontWeight: 'medium',
+    whiteSpace: 'nowrap',
+    borderBottomWidth: '2px',
+    borderTopWidth: '2px',
+    borderColor: 'transparent',
+    _hover: { color: 'ink' },
+    '&[aria-current=page]': { color: 'ink', borderBottomColor: 'bracken' },
+  },
+});
+
+/** On a telephone two rows: the name and the colours, then the three ways in. */
+export function Header() {
+  return (
+    <chakra.header borderBottomWidth="1px" borderColor="hair" bg="chalk">
+      <chakra.div
+        display="flex"
+        flexWrap="wrap"
+        alignItems="center"
+        columnGap={{ base: '4', md: '8' }}
+        maxWidth="page"
+        marginInline="auto"
+        paddingInline={{ base: '4', sm: '6', lg: '10' }}
+        paddingBlock={{ base: '1', md: '2' }}
+      >
+        <Home to="/">
+          <Mark />
+          Linkfell
+        </Home>
+        <chakra.nav
+          aria-label="Main"
+          display="flex"
+          justifyContent="space-between"
+          gap={{ base: '2', sm: '6' }}
+          order={{ base: '3', md: '0' }}
+          width={{ base: 'full', md: 'auto' }}
+        >
+          <Item to="/measure-up">Measure-up</Item>
+          <Item to="/find-order">Find my order</Item>
+          <Item to="/sign-in">Sign in</Item>
+        </chakra.nav>
+        <ColourModeSwitch />
+      </chakra.div>
+    </chakra.header>
+  );
+}

@@ -1,0 +1,2 @@
+import { PageHeading } from '../../components/page-heading';
+export const PrivacyPage = () => <PageHeading>Privacy</PageHeading>;

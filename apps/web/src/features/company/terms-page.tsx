@@ -1,0 +1,2 @@
+import { PageHeading } from '../../components/page-heading';
+export const TermsPage = () => <PageHeading>Terms</PageHeading>;
