@@ -3,7 +3,7 @@ import { createBrowserRouter, matchRoutes, type RouteObject } from 'react-router
 import { App } from './app/app';
 import { routeObjects } from './app/route-objects';
 import { makeQueryClient } from './lib/query-client';
-import './theme/font.css';
+import './theme/first-paint.css';
 
 /** Fetches the page that the address asks for before the first render: a prerendered one must not flash empty. */
 async function withFirstPage(routes: RouteObject[]): Promise<RouteObject[]> {
@@ -19,8 +19,14 @@ async function start(root: HTMLElement): Promise<void> {
   // A page that cannot be fetched here is fetched again by the router, which shows what went wrong.
   await withFirstPage(routes).catch(() => undefined);
   const app = <App router={createBrowserRouter(routes)} queries={makeQueryClient()} />;
-  if (root.hasChildNodes()) hydrateRoot(root, app);
-  else createRoot(root).render(app);
+  const { dataset } = document.documentElement;
+  if (root.hasChildNodes() && dataset.foreign === undefined) {
+    hydrateRoot(root, app);
+    return;
+  }
+  root.replaceChildren();
+  delete dataset.foreign;
+  createRoot(root).render(app);
 }
 
 const root = document.getElementById('root');

@@ -3,7 +3,12 @@ import { QueryClientProvider, type QueryClient } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { system } from '../theme/system';
 
-export function Providers({ queries, children }: { queries: QueryClient; children: ReactNode }) {
+export interface ProvidersProps {
+  queries: QueryClient;
+  children: ReactNode;
+}
+
+export function Providers({ queries, children }: ProvidersProps) {
   return (
     <QueryClientProvider client={queries}>
       <ChakraProvider value={system}>{children}</ChakraProvider>

@@ -3,7 +3,7 @@ import { useSyncExternalStore } from 'react';
 export const colourModes = ['light', 'dark', 'system'] as const;
 export type ColourMode = (typeof colourModes)[number];
 
-/** Known to public/colour-mode.js too, which runs before the first paint. */
+/** Known to public/first-paint.js too, which runs before the first paint. */
 const key = 'linkfell.colour-mode';
 const listeners = new Set<() => void>();
 const darkQuery = '(prefers-color-scheme: dark)';

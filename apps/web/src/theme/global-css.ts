@@ -1,8 +1,8 @@
-import { defineGlobalStyles, type SystemStyleObject } from '@chakra-ui/react';
+import { defineGlobalStyles } from '@chakra-ui/react';
 import { palette } from './palette';
 
 /** In forced colours the reader's own palette wins, in the drawings too, which browsers leave alone. */
-const forced: SystemStyleObject = Object.fromEntries(
+const forced: Record<`--lf-colors-${string}`, string> = Object.fromEntries(
   Object.keys(palette).map((name) => {
     const ground = /^(chalk|paper|wash|onBracken|.*Tint)$/.test(name);
     const link = /^(tarn|bracken)(Deep)?$/.test(name);
