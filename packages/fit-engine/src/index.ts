@@ -9,3 +9,6 @@ export { reasonCodes, type ReasonCode } from './messages/reason-codes.js';
 export { torqueSlipRange } from './springs/torque.js';
 export * from './units/factors.js';
 export * from './units/parse.js';
+export * from './units/format.js';
+export { mountFamily, presentSize } from './sizing/present-size.js';
+export { readingUncertaintyMm } from './sizing/reading-uncertainty.js';

@@ -1,92 +1,24 @@
-import type { CheckAnswer, Judgement, SpringForRider, Verdict } from './answers.js';
+import type { Judgement, Verdict } from './answers.js';
 import { advise } from './advice.js';
 import type { FitQuestion, ShockFacts } from './facts.js';
-import { coilOnYokeCheck, springTypeCheck } from './rules/spring-type.js';
-import { diameterCheck } from './rules/diameter.js';
-import { eBikeCheck, noticesCheck, positionCheck, readingConflictCheck } from './rules/others.js';
-import { hardwareCheck } from './rules/hardware.js';
-import { mountsCheck } from './rules/mounts.js';
-import { pressureCheck } from './rules/pressure.js';
-import { remoteCheck } from './rules/remote.js';
-import { reservoirCheck } from './rules/reservoir.js';
-import { riderWeightCheck } from './rules/rider-weight.js';
-import { entryApplies, sizeChecks } from './rules/size.js';
-import { springRateCheck } from './rules/spring-rate.js';
-import { answer, rankOf, worst, type Shared, type Trial } from './rules/context.js';
-import { resolveSize } from './sizing/resolve-size.js';
+import { rankOf, worst, type Shared } from './rules/context.js';
+import { entryApplies } from './rules/entry-applies.js';
+import { better, runTrial } from './rules/run-trial.js';
+import { presentSize } from './sizing/present-size.js';
 
 const verdicts: readonly Verdict[] = ['bolts-straight-in', 'fits-with-work', 'needs-an-answer', 'wont-fit'];
-
-interface Outcome {
-  trial: Trial;
-  answers: CheckAnswer[];
-  spring: SpringForRider | null;
-  positionDeg: number | null;
-}
-
-/** All checks of one trial, in the order in which they are shown; the sweep only while nothing cheap has failed. */
-function runTrial(trial: Trial): Outcome {
-  const [eye, stroke] = sizeChecks(trial);
-  const rate = springRateCheck(trial);
-  const pressure = pressureCheck(trial);
-  const cheap = [
-    eye,
-    stroke,
-    mountsCheck(trial),
-    hardwareCheck(trial),
-    springTypeCheck(trial),
-    coilOnYokeCheck(trial),
-    rate.answer,
-    pressure.answer,
-    riderWeightCheck(trial),
-    diameterCheck(trial),
-    remoteCheck(trial),
-    positionCheck(trial),
-    eBikeCheck(trial),
-    noticesCheck(trial),
-    readingConflictCheck(trial),
-  ];
-  const looked = trial.full || worst(cheap) !== 'fail';
-  const room = looked ? reservoirCheck(trial) : null;
-  const reservoir = room?.answer ?? answer('reservoir', 'pass', 'reservoir-inline');
-  return {
-    trial,
-    answers: room ? [...cheap.slice(0, 9), reservoir, ...cheap.slice(9)] : cheap,
-    spring: trial.shock.spring.kind === 'coil' ? rate.spring : pressure.spring,
-    positionDeg: room?.positionDeg ?? null,
-  };
-}
-
-/** Fewer fails, then fewer unknowns, then less work, then fewer parts. */
-function cost({ answers }: Outcome): number[] {
-  const count = (rank: number): number => answers.filter(({ answer: kind }) => rankOf(kind) === rank).length;
-  return [
-    rankOf(worst(answers)),
-    count(3),
-    count(2),
-    count(1),
-    answers.reduce((sum, { parts }) => sum + parts.length, 0),
-  ];
-}
-
-function better(a: Outcome, b: Outcome): Outcome {
-  const [costA, costB] = [cost(a), cost(b)];
-  const index = costA.findIndex((value, i) => value !== costB[i]);
-  return index >= 0 && (costB[index] ?? 0) < (costA[index] ?? 0) ? b : a;
-}
+const ways = ['body-to-frame', 'body-to-link'] as const;
 
 function judgeWith(question: FitQuestion, shared: Shared, full: boolean): Judgement {
-  const ways = ['body-to-frame', 'body-to-link'] as const;
   const { entries } = question.frame;
-  // An entry for another year, size or chip has no say while there is one for this bike.
-  const applying = entries.filter((entry) => entryApplies(question, entry) !== 'no');
-  const outcomes = (applying.length > 0 ? applying : entries).flatMap((entry) =>
+  // An entry for another year, size or chip position must neither save a shock nor condemn it.
+  const speaking = entries.filter((entry) => shared.applies.get(entry)?.state !== 'no');
+  const outcomes = (speaking.length > 0 ? speaking : entries).flatMap((entry) =>
     ways.map((wayRound) => runTrial({ ...question, shared, entry, wayRound, full })),
   );
   const [first, ...others] = outcomes;
   if (!first) throw new RangeError('a frame needs at least one entry');
-  const best = others.reduce(better, first);
-  const { answers, trial, spring, positionDeg } = best;
+  const { answers, trial, spring, positionDeg } = others.reduce(better, first);
   const work = answers.flatMap((given) => given.work);
   return {
     verdict: verdicts[rankOf(worst(answers))] ?? 'wont-fit',
@@ -102,16 +34,14 @@ function judgeWith(question: FitQuestion, shared: Shared, full: boolean): Judgem
   };
 }
 
-/** The size of the present shock as far as it bears on this frame. */
-function sharedBy({ frame, present }: Pick<FitQuestion, 'frame' | 'present'>): Shared {
-  const published = frame.origin === 'sheet' ? frame.entries.flatMap((entry) => entry.sizeKey ?? []) : null;
-  const kinds = [present.bodyEndKind, present.shaftEndKind];
-  const ends = frame.entries.flatMap((entry) => [entry.frameEnd, entry.linkEnd]);
-  const trunnion = kinds.includes('trunnion') || ends.some((end) => end?.mount.kind === 'trunnion');
-  const eyelet =
-    !trunnion &&
-    ((kinds[0] !== null && kinds[1] !== null) || (ends.length > 0 && ends.every((end) => end !== null)));
-  return { size: resolveSize(present, published, trunnion ? 'trunnion' : eyelet ? 'eyelet' : null) };
+/** What all shocks of one question share. */
+function sharedBy({ frame, present, rider }: Pick<FitQuestion, 'frame' | 'present' | 'rider'>): Shared {
+  return {
+    size: presentSize(frame, present),
+    applies: new Map(frame.entries.map((entry) => [entry, entryApplies(frame, rider, entry)])),
+    rides: new Map(),
+    coils: new Map(),
+  };
 }
 
 /**

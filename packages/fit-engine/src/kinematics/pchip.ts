@@ -57,6 +57,13 @@ export function pchipPieces(x: readonly number[], y: readonly number[]): Piece[]
   });
 }
 
+/** Index of the piece that holds x; the ends hold what lies outside. */
+export function pieceAt(pieces: readonly Piece[], x: number): number {
+  let index = pieces.length - 1;
+  while (index > 0 && (pieces[index]?.x0 ?? 0) > x) index -= 1;
+  return index;
+}
+
 export const valueOf = (p: Piece, x: number): number => {
   const t = x - p.x0;
   return p.a + t * (p.b + t * (p.c + t * p.d));

@@ -10,7 +10,7 @@ export const sentences = {
     'This shock is {shock.size}, shorter between the eyes than the {frame.size} that the frame takes.',
   'eye-to-eye-from-your-shock':
     'Eye-to-eye agrees with your present shock; the frame’s maker has not confirmed it.',
-  'size-no-entry-for-this-bike': 'The frame sheet has no size for your year or frame size.',
+  'size-no-entry-for-this-bike': 'The frame sheet has no size for your year, frame size or chip position.',
   'size-of-yours-not-settled':
     'The size of your present shock is not settled, and nobody has listed this frame.',
   'size-yours-may-be-changed':
@@ -25,7 +25,8 @@ export const sentences = {
     'The stroke of this {shock.size} is longer than the maker allows; links or wheel may touch at the end.',
   'stroke-shorter':
     'The stroke of this {shock.size} is shorter than the maker lists; the bike would lose travel and end its stroke elsewhere.',
-  'stroke-depends-on-frame': 'Which stroke is right depends on your frame size or year.',
+  'stroke-depends-on-frame':
+    'Which size is right depends on your year, frame size or chip position, which we have not been told.',
   'mounts-agree': 'Both mounts agree.',
   'mounts-need-an-eyelet': 'The frame needs an eyelet where this shock has something else.',
   'mounts-need-a-trunnion': 'The frame needs a trunnion where this shock has something else.',
@@ -91,6 +92,12 @@ export const sentences = {
   'reservoir-room-measured': 'It fits the room you measured.',
   'reservoir-room-too-small': 'It is larger than the room you measured.',
   'reservoir-room-in-doubt': 'The room you measured is too close to tell.',
+  'reservoir-word-against-your-room':
+    'The maker says it fits, but it is larger than the room you measured: somebody has to look.',
+  'reservoir-drawing-against-your-room':
+    'Our drawing leaves {computed.clearance}, but it is larger than the room you measured: somebody has to look.',
+  'reservoir-drawing-incomplete':
+    'Not every part or position near the reservoir is drawn, so its room through the stroke is not known.',
   'reservoir-not-stated': 'Whether there is room for a reservoir is not stated.',
   'diameter-fits': 'It has 2 mm or more on each side in the tunnel.',
   'diameter-too-wide':

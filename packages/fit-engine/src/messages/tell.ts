@@ -1,10 +1,12 @@
-import type { Advice, AskNeed, CheckAnswer, Figure, WorkNeed } from '../answers.js';
+import type { Advice, AskNeed, CheckAnswer, WorkNeed } from '../answers.js';
 import type { Source } from '../facts.js';
 import { sizes } from '../sizing/sizes.js';
 import type { SizeResult } from '../sizing/resolve-size.js';
-import { kPaPerBar, kPaPerPsi } from '../units/factors.js';
-import { labels, valueWords } from './labels.en.js';
+import { figureText } from './figure-text.js';
+import { labels } from './labels.en.js';
 import { sentences } from './sentences.en.js';
+
+export { figureText };
 
 export interface Told {
   /** One plain sentence. */
@@ -12,35 +14,12 @@ export interface Told {
   figures: { label: string; text: string; source: Source }[];
 }
 
-/** A figure with its unit and sensible digits. */
-export function figureText({ value, unit }: Figure): string {
-  if (value === null) return 'not known';
-  if (typeof value === 'string') return (valueWords[value] ?? value) + (unit ? ` ${unit}` : '');
-  switch (unit) {
-    case 'kPa':
-      return `${(value / kPaPerBar).toFixed(1)} bar (${Math.round(value / kPaPerPsi)} psi)`;
-    case '%':
-      return `${value.toFixed(1)} %`;
-    case 'lb/in':
-      return `${Math.round(value)} lb/in`;
-    case 'mm':
-    case 'kg':
-      return `${Number(value.toFixed(1))} ${unit}`;
-    case 'N/mm':
-    case 'psi':
-    case 'm':
-    case 'deg':
-    case 'g':
-    case 'h':
-      return `${Math.round(value)} ${unit}`;
-    case null:
-      return String(value);
-  }
-}
-
 /** An answer or a piece of advice in one sentence and in full. */
 export function tell(said: CheckAnswer | Advice): Told {
-  const texts = new Map(said.figures.map((figure) => [figure.key, figureText(figure)]));
+  const texts = new Map<string, string>();
+  for (const figure of said.figures) {
+    if (!texts.has(figure.key)) texts.set(figure.key, figureText(figure));
+  }
   const pattern: string = sentences[said.code as keyof typeof sentences] ?? said.code;
   return {
     short: pattern.replace(/\{([^}]+)\}/g, (_, key: string) => texts.get(key) ?? 'a figure we do not have'),

@@ -1,11 +1,33 @@
-import type { AnswerKind, AskNeed, CheckAnswer, CheckId, Figure, PartNeed, WorkNeed } from '../answers.js';
+import type {
+  AnswerKind,
+  AskNeed,
+  CheckAnswer,
+  CheckId,
+  Figure,
+  PartNeed,
+  SpringForRider,
+  WorkNeed,
+} from '../answers.js';
 import type { FitQuestion, FrameEnd, SheetEntry, ShockMount, Source } from '../facts.js';
 import type { SizeResult } from '../sizing/resolve-size.js';
 import type { ReasonCode } from '../messages/reason-codes.js';
+import type { Applies } from './entry-applies.js';
+import type { Ride, RideResult } from './ride.js';
+
+export interface SpringAnswer {
+  answer: CheckAnswer;
+  spring: SpringForRider | null;
+}
 
 /** What all shocks of one judgement share. */
 export interface Shared {
   size: SizeResult;
+  /** Which entries speak for the rider's bike. */
+  applies: Map<SheetEntry, Applies>;
+  /** Load, window and leverage by entry and stroke. */
+  rides: Map<SheetEntry, Map<string, RideResult>>;
+  /** Springs already chosen, by what they depend on. */
+  coils: Map<Ride, Map<string, SpringAnswer>>;
 }
 
 /** One way of putting this shock in: against one entry of the sheet, one way round. */

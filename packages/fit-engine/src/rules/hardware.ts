@@ -21,16 +21,15 @@ export function hardwareCheck(trial: Trial): CheckAnswer {
       ? [figure(`frame.${end}Hardware`, `${frame.mount.widthMm}x${frame.mount.boltMm}`, 'mm', frame.source)]
       : [],
   );
-  const open = ends.find(({ found }) => openCode(found) !== null);
-  if (open) {
-    const ask: AskNeed = {
-      fact: open.end === 'frame' ? 'entry.frameEnd' : 'entry.linkEnd',
-      whom: open.found.kind === 'none-on-sale' ? 'workshop' : 'rider',
-    };
-    return answer('hardware', 'unknown', openCode(open.found) ?? 'hardware-not-measured', {
-      figures,
-      ask: [ask],
-    });
+  const open = ends.filter(({ found }) => openCode(found) !== null);
+  const [first] = open;
+  if (first) {
+    const ask = open.map(({ end, found }): AskNeed => ({
+      fact:
+        found.kind === 'none-on-sale' ? 'sale.kits' : end === 'frame' ? 'entry.frameEnd' : 'entry.linkEnd',
+      whom: found.kind === 'none-on-sale' ? 'workshop' : 'rider',
+    }));
+    return answer('hardware', 'unknown', openCode(first.found) ?? 'hardware-not-measured', { figures, ask });
   }
   const parts: PartNeed[] = [];
   const work: WorkNeed[] = [];

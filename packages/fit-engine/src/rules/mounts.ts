@@ -1,6 +1,7 @@
 import type { AnswerKind, CheckAnswer, Figure } from '../answers.js';
 import type { ReasonCode } from '../messages/reason-codes.js';
 import { answer, endsOf, figure, rankOf, type Trial, type TrialEnd } from './context.js';
+import { known } from './known.js';
 
 interface EndVerdict {
   kind: AnswerKind;
@@ -16,7 +17,10 @@ export function mountsCheck(trial: Trial): CheckAnswer {
     figures: [...a.figures, ...b.figures],
     ask:
       decides.kind === 'unknown'
-        ? [{ fact: decides === a ? 'entry.frameEnd' : 'entry.linkEnd', whom: 'rider' }]
+        ? [
+            ...(a.kind === 'unknown' ? [{ fact: 'entry.frameEnd', whom: 'rider' } as const] : []),
+            ...(b.kind === 'unknown' ? [{ fact: 'entry.linkEnd', whom: 'rider' } as const] : []),
+          ]
         : [],
   });
 }
@@ -56,6 +60,8 @@ function judgeEnd({ end, frame, shock }: TrialEnd, trial: Trial): EndVerdict {
         ...figures,
         figure(`frame.${end}Bolt`, mount.boltMm, 'mm', frame.source),
         figure(`shock.${end}Bolt`, shock.boltMm, 'mm', trial.shock.source),
+        figure(`frame.${end}BearingWidth`, mount.widthMm, 'mm', frame.source),
+        figure(`shock.${end}BearingWidth`, shock.widthMm, 'mm', trial.shock.source),
       ];
       return lengths(
         [
@@ -73,19 +79,23 @@ function judgeEnd({ end, frame, shock }: TrialEnd, trial: Trial): EndVerdict {
 /** Widest doubt in which a rider's reading still says which of the trade's diameters it is, mm. */
 const clearEnoughMm = 1.2;
 
-/** Pairs of frame figure and shock figure: nominals must be equal, readings within two uncertainties and then confirmed. */
+/**
+ * Pairs of frame figure and shock figure. Nominals must be equal. A rider's reading agrees within two uncertainties
+ * (then confirmed at fitting), differs beyond four, and says nothing certain in between.
+ */
 function lengths(
   pairs: readonly (readonly [number | null, number])[],
   u: number,
   figures: Figure[],
   differs: ReasonCode,
 ): EndVerdict {
-  const apart = pairs.map(([own, theirs]) => (own === null ? null : Math.abs(own - theirs)));
-  if (apart.some((mm) => mm !== null && mm > (u === 0 ? 0.01 : 2 * u)))
-    return verdict('fail', differs, figures);
+  const apart = pairs.map(([own, theirs]) => (known(own) && known(theirs) ? Math.abs(own - theirs) : null));
+  const [agrees, refuses] = u === 0 ? [0.01, 0.01] : [2 * u, 4 * u];
+  if (apart.some((mm) => mm !== null && mm > refuses)) return verdict('fail', differs, figures);
   if (apart.includes(null)) return verdict('unknown', 'mounts-not-measured', figures);
   if (u === 0) return verdict('pass', 'mounts-agree', figures);
-  return 2 * u <= clearEnoughMm
+  const clear = 2 * u <= clearEnoughMm && apart.every((mm) => mm !== null && mm <= agrees);
+  return clear && u > 0
     ? verdict('work', 'mounts-agree-by-your-reading', figures)
     : verdict('unknown', 'mounts-reading-too-coarse', figures);
 }

@@ -1,4 +1,5 @@
 import type { CheckAnswer } from '../answers.js';
+import { sizeOf } from '../sizing/sizes.js';
 import { answer, figure, riderSaid, type Trial } from './context.js';
 
 /** Makers' rules on which end goes where. */
@@ -35,7 +36,10 @@ export function eBikeCheck({ frame, shock }: Trial): CheckAnswer {
 
 /** A maker's recall stops the sale; other notices are shown. */
 export function noticesCheck({ frame, shock }: Trial): CheckAnswer {
-  const notices = [...frame.notices, ...shock.notices];
+  // A recall first: the sentence names the first.
+  const notices = [...frame.notices, ...shock.notices].sort(
+    (a, b) => Number(b.effect === 'stop') - Number(a.effect === 'stop') || (a.id < b.id ? -1 : 1),
+  );
   const figures = notices.map((notice) => figure('notice', notice.title, null, notice.source));
   if (notices.some((notice) => notice.effect === 'stop'))
     return answer('notices', 'fail', 'notices-stop', { figures });
@@ -44,16 +48,22 @@ export function noticesCheck({ frame, shock }: Trial): CheckAnswer {
     : answer('notices', 'pass', 'notices-none');
 }
 
-/** A settled reading that the sheet does not list stands against every match until somebody says which is right. */
+/**
+ * A settled reading that the sheet does not list for this bike (year, size, chip position) stands against every match until
+ * somebody says which is right.
+ */
 export function readingConflictCheck({ frame, rider, shared }: Trial): CheckAnswer {
   const { size } = shared;
-  const listed = frame.entries.map((entry) => entry.sizeKey);
+  const speaking = frame.entries.filter((entry) => shared.applies.get(entry)?.state !== 'no');
+  const listed = (speaking.length > 0 ? speaking : frame.entries).map(({ sizeKey }) =>
+    sizeKey === null ? null : (sizeOf(sizeKey)?.key ?? sizeKey),
+  );
   if (frame.origin === 'described' || size.state !== 'settled' || listed.includes(size.sizeKey)) {
     return answer('reading-conflict', 'pass', 'reading-no-conflict');
   }
   const figures = [
     figure('present.size', size.sizeKey, null, riderSaid),
-    figure('frame.size', listed.join(', '), null, frame.entries[0]?.source ?? riderSaid),
+    figure('frame.size', [...new Set(listed)].join(', '), null, frame.entries[0]?.source ?? riderSaid),
   ];
   return rider.confirmsSheetSize
     ? answer('reading-conflict', 'pass', 'reading-conflict-confirmed', { figures, remark: true })

@@ -5,8 +5,9 @@ const ask = (fact: string, whom: AskNeed['whom'] = 'rider'): readonly AskNeed[] 
 
 /** Whether the shock can be worked from the bar as the rider wants, and what that takes. */
 export function remoteCheck(trial: Trial): CheckAnswer {
-  const { rider, shock } = trial;
-  if (rider.wantsRemote === null && shock.remote?.action !== 'pull-to-lock') {
+  const { rider } = trial;
+  // Not answered is not "no": a shock that suits either wish would still need its lever priced, or not.
+  if (rider.wantsRemote === null) {
     return answer('remote', 'unknown', 'remote-wish-not-known', { ask: ask('rider.wantsRemote') });
   }
   return rider.wantsRemote ? wanted(trial) : notWanted(trial);
@@ -22,9 +23,14 @@ function wanted({ rider, shock, frame, present, sale }: Trial): CheckAnswer {
   ];
   const work: WorkNeed[] = [];
   const parts: PartNeed[] = [];
-  if (!routing)
-    return answer('remote', 'unknown', 'remote-routing-not-known', { ask: ask('frame.cableRouting') });
-  if (routing.value === 'none') {
+  // Outside the frame there is always a way, known routing or not, once the rider accepts it.
+  if (!routing && rider.acceptsExternalRouting !== true) {
+    return answer('remote', 'unknown', 'remote-routing-not-known', {
+      figures,
+      ask: [...ask('frame.cableRouting'), ...ask('rider.acceptsExternalRouting')],
+    });
+  }
+  if (!routing || routing.value === 'none') {
     if (rider.acceptsExternalRouting !== true) {
       return answer('remote', 'unknown', 'remote-no-routing', {
         figures,
@@ -35,7 +41,9 @@ function wanted({ rider, shock, frame, present, sale }: Trial): CheckAnswer {
   }
   const own = present.remoteAction === remote.action && present.remoteLine === remote.line;
   if (!own) {
-    const lever = sale.remotes.find(({ action, line }) => action === remote.action && line === remote.line);
+    const [lever] = sale.remotes
+      .filter(({ action, line }) => action === remote.action && line === remote.line)
+      .sort((a, b) => (a.id < b.id ? -1 : 1));
     if (!lever)
       return answer('remote', 'unknown', 'remote-no-lever-on-sale', {
         figures,

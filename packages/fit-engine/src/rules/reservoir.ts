@@ -1,7 +1,10 @@
-import type { AskNeed, CheckAnswer } from '../answers.js';
+import type { AskNeed, CheckAnswer, Figure } from '../answers.js';
+import type { Reservoir } from '../facts.js';
 import { sweep, type SweepResult } from '../clearance/sweep.js';
 import { sizeOf } from '../sizing/sizes.js';
 import { answer, computed, figure, type Trial } from './context.js';
+import { slack } from './known.js';
+import { ridersRoom } from './riders-room.js';
 
 /** This must stay free, mm; 5 mm is comfortable (common practice). */
 const mustBeFreeMm = 3;
@@ -14,111 +17,128 @@ export interface ReservoirAnswer {
 
 const measure: AskNeed = { fact: 'frame.reservoirRoom', whom: 'rider' };
 const askMaker: AskNeed = { fact: 'frame.reservoirStatement', whom: 'frame-maker' };
+const only = (given: CheckAnswer, positionDeg: number | null = null): ReservoirAnswer => ({
+  answer: given,
+  positionDeg,
+});
 
-/** Room for a reservoir: prohibition first, then what can be computed, then the maker's word, then the rider's room. */
+/**
+ * Room for a reservoir. A prohibition comes first; then what the drawings say; then the maker's word; then the room
+ * the rider measured. A permission never overrides a collision that was computed or measured: then it is not known.
+ */
 export function reservoirCheck(trial: Trial): ReservoirAnswer {
-  const { shock, frame } = trial;
-  const { reservoir } = shock;
-  if (!reservoir) return { answer: answer('reservoir', 'pass', 'reservoir-inline'), positionDeg: null };
-  const word = frame.reservoirStatement;
+  const { reservoir } = trial.shock;
+  if (!reservoir) return only(answer('reservoir', 'pass', 'reservoir-inline'));
+  const word = trial.frame.reservoirStatement;
   const said = word && figure('frame.reservoir', word.value, null, word.source);
   if (word?.value === 'inline-only') {
-    return {
-      answer: answer('reservoir', 'fail', 'reservoir-refused', { figures: [said] }),
-      positionDeg: null,
-    };
+    return only(answer('reservoir', 'fail', 'reservoir-refused', { figures: [said] }));
   }
-  const refused = frame.refusedPositions?.value ?? [];
-  const positions = reservoir.positionsDeg.filter((position) => !refused.includes(position));
+  const refused = (trial.frame.refusedPositions?.value ?? []).map(aroundDeg);
+  const positions = reservoir.positionsDeg.filter((position) => !refused.includes(aroundDeg(position)));
   if (positions.length === 0) {
-    return {
-      answer: answer('reservoir', 'fail', 'reservoir-no-position-left', { figures: [said] }),
-      positionDeg: null,
-    };
+    const rule = trial.frame.refusedPositions;
+    const figures = [rule && figure('frame.refusedPositions', rule.value.join(', '), 'deg', rule.source)];
+    return only(answer('reservoir', 'fail', 'reservoir-no-position-left', { figures }));
   }
-  const swept = bestPosition(trial, positions);
-  if (swept) {
-    const { result, positionDeg } = swept;
-    const figures = [
-      said,
-      figure('computed.clearance', result.distanceMm, 'mm', computed),
-      figure('computed.tightestPart', result.part, null, computed),
-      figure('computed.tightestAt', result.atShockTravelMm, 'mm', computed),
-    ];
-    if (result.distanceMm < mustBeFreeMm) {
-      // A permission never overrides a computed collision: somebody has to look.
-      return word?.value === 'fits'
-        ? {
-            answer: answer('reservoir', 'unknown', 'reservoir-word-against-drawing', {
-              figures,
-              ask: [askMaker],
-            }),
-            positionDeg,
-          }
-        : { answer: answer('reservoir', 'fail', 'reservoir-touches', { figures }), positionDeg: null };
-    }
-    const snug = result.distanceMm < comfortableMm;
-    return {
-      answer: answer('reservoir', 'pass', snug ? 'reservoir-clears-narrowly' : 'reservoir-clears', {
-        figures,
-        remark: snug,
-      }),
-      positionDeg,
-    };
-  }
-  const positionDeg = positions[0] ?? null;
-  // A part that moves in a way nobody has drawn may meet the reservoir, whatever is said.
-  if (frame.room?.outlines.some((part) => part.moves && !part.poses)) {
-    return {
-      answer: answer('reservoir', 'unknown', 'reservoir-movement-not-drawn', {
-        figures: [said],
-        ask: [askMaker],
-      }),
-      positionDeg,
-    };
-  }
-  if (word)
-    return { answer: answer('reservoir', 'pass', 'reservoir-stated', { figures: [said] }), positionDeg };
-  return { answer: byRidersRoom(trial), positionDeg };
+  return byDrawing(trial, reservoir, positions, said) ?? byWordOrRoom(trial, positions[0] ?? null, said);
 }
 
-/** The position with the most room, or null where it cannot be computed. */
-function bestPosition(
-  { frame, shock, entry, wayRound }: Trial,
+/** A turned position is the same a full turn on. */
+const aroundDeg = (deg: number): number => ((deg % 360) + 360) % 360;
+
+interface Swept {
+  positionDeg: number;
+  result: SweepResult & { distanceMm: number };
+}
+
+/** What the outlines say, or null where they say nothing final and the maker's word or the rider's room may. */
+function byDrawing(
+  trial: Trial,
+  reservoir: Reservoir,
   positions: readonly number[],
-): { result: SweepResult & { state: 'known' }; positionDeg: number } | null {
-  const size = sizeOf(entry.sizeKey ?? shock.sizeKey);
-  if (!frame.room || !shock.reservoir || !size) return null;
-  let best: { result: SweepResult & { state: 'known' }; positionDeg: number } | null = null;
-  for (const positionDeg of positions) {
-    const body = shock.reservoir.outlines.find((outline) => outline.positionDeg === positionDeg)?.polygon;
-    if (!body) continue;
-    const result = sweep(frame.room, {
-      body,
-      eyeToEyeMm: size.eyeToEyeMm,
-      strokeMm: size.strokeMm,
-      wayRound,
-    });
-    if (result.state === 'known' && (!best || result.distanceMm > best.result.distanceMm))
-      best = { result, positionDeg };
+  said: Figure | null,
+): ReservoirAnswer | null {
+  const size = sizeOf(trial.entry.sizeKey ?? trial.shock.sizeKey);
+  const { room, reservoirStatement: word } = trial.frame;
+  if (!room || !size) return null;
+  const results = positions.map((positionDeg) => {
+    const body = reservoir.outlines.find((outline) => outline.positionDeg === positionDeg)?.polygon ?? [];
+    const { eyeToEyeMm, strokeMm } = size;
+    return { positionDeg, result: sweep(room, { body, eyeToEyeMm, strokeMm, wayRound: trial.wayRound }) };
+  });
+  const judged = results.filter((one): one is Swept => one.result.distanceMm !== null);
+  const [first, ...others] = judged;
+  if (!first) return incomplete(word?.value === 'fits', results[0]?.result.incomplete ?? null, said);
+  const rank = ({ result }: Swept): number => result.distanceMm + (result.incomplete === null ? 0 : -1e6);
+  const { positionDeg, result } = others.reduce((best, one) => (rank(one) > rank(best) ? one : best), first);
+  const figures = [said, ...drawnFigures(result)];
+  if (result.distanceMm < mustBeFreeMm - slack) {
+    if (word) {
+      return only(
+        answer('reservoir', 'unknown', 'reservoir-word-against-drawing', { figures, ask: [askMaker] }),
+      );
+    }
+    // Another position that nobody has drawn may have the room that this one lacks.
+    return judged.length < positions.length
+      ? only(answer('reservoir', 'unknown', 'reservoir-drawing-incomplete', { figures, ask: [askMaker] }))
+      : only(answer('reservoir', 'fail', 'reservoir-touches', { figures }));
   }
-  return best;
+  if (result.incomplete !== null) return incomplete(word?.value === 'fits', result.incomplete, said);
+  const measured = ridersRoom(trial.frame.reservoirRoom, reservoir, trial.shock.source);
+  if (measured?.state === 'too-small') {
+    return only(
+      answer('reservoir', 'unknown', 'reservoir-drawing-against-your-room', {
+        figures: [...figures, ...measured.figures],
+        ask: [measure, askMaker],
+      }),
+    );
+  }
+  const snug = result.distanceMm < comfortableMm - slack;
+  const code = snug ? 'reservoir-clears-narrowly' : 'reservoir-clears';
+  return only(answer('reservoir', 'pass', code, { figures, remark: snug }), positionDeg);
 }
 
-function byRidersRoom({ frame, shock }: Trial): CheckAnswer {
-  const { reservoir } = shock;
-  const room = frame.reservoirRoom;
-  if (!room || !reservoir)
-    return answer('reservoir', 'unknown', 'reservoir-not-stated', { ask: [measure, askMaker] });
-  const { diameterMm, lengthMm, uncertaintyMm: u } = room.value;
-  const figures = [
-    figure('frame.roomDiameter', diameterMm, 'mm', room.source),
-    figure('shock.reservoirDiameter', reservoir.diameterMm, 'mm', shock.source),
-    figure('frame.roomLength', lengthMm, 'mm', room.source),
-    figure('shock.reservoirLength', reservoir.lengthMm, 'mm', shock.source),
-  ];
-  const spare = Math.min(diameterMm - reservoir.diameterMm, lengthMm - reservoir.lengthMm) - mustBeFreeMm;
-  if (spare >= 2 * u) return answer('reservoir', 'pass', 'reservoir-room-measured', { figures });
-  if (spare < -2 * u) return answer('reservoir', 'fail', 'reservoir-room-too-small', { figures });
-  return answer('reservoir', 'unknown', 'reservoir-room-in-doubt', { figures, ask: [measure] });
+/** Room shown rounded down: a figure on screen must not look like enough where it is not. */
+const drawnFigures = ({ distanceMm, part, atShockTravelMm }: Swept['result']): Figure[] => [
+  figure('computed.clearance', Math.floor(distanceMm * 10 + slack) / 10, 'mm', computed),
+  figure('computed.tightestPart', part, null, computed),
+  figure('computed.tightestAt', atShockTravelMm, 'mm', computed),
+];
+
+/** Drawings with a gap decide nothing by themselves; the maker's word may, the rider's still measure may not see motion. */
+function incomplete(
+  makerSaysFits: boolean,
+  missing: string | null,
+  said: Figure | null,
+): ReservoirAnswer | null {
+  if (makerSaysFits || missing === null) return null;
+  const figures = [said, figure('room.missing', missing, null, computed)];
+  return only(answer('reservoir', 'unknown', 'reservoir-drawing-incomplete', { figures, ask: [askMaker] }));
+}
+
+function byWordOrRoom(trial: Trial, positionDeg: number | null, said: Figure | null): ReservoirAnswer {
+  const { frame, shock } = trial;
+  const measured = shock.reservoir && ridersRoom(frame.reservoirRoom, shock.reservoir, shock.source);
+  const figures = [said, ...(measured?.figures ?? [])];
+  if (frame.reservoirStatement) {
+    return measured?.state === 'too-small'
+      ? only(
+          answer('reservoir', 'unknown', 'reservoir-word-against-your-room', {
+            figures,
+            ask: [measure, askMaker],
+          }),
+        )
+      : only(answer('reservoir', 'pass', 'reservoir-stated', { figures }), positionDeg);
+  }
+  if (!measured)
+    return only(answer('reservoir', 'unknown', 'reservoir-not-stated', { ask: [measure, askMaker] }));
+  switch (measured.state) {
+    case 'fits':
+      return only(answer('reservoir', 'pass', 'reservoir-room-measured', { figures }), positionDeg);
+    case 'too-small':
+      return only(answer('reservoir', 'fail', 'reservoir-room-too-small', { figures }));
+    case 'in-doubt':
+      return only(answer('reservoir', 'unknown', 'reservoir-room-in-doubt', { figures, ask: [measure] }));
+  }
 }

@@ -1,38 +1,18 @@
 import type { AnswerKind, AskNeed, CheckAnswer } from '../answers.js';
-import type { SheetEntry } from '../facts.js';
 import { sizeOf } from '../sizing/sizes.js';
 import { answer, computed, figure, riderSaid, type Trial } from './context.js';
+import { entryApplies } from './entry-applies.js';
+import { positive } from './known.js';
 
 const askMaker: AskNeed = { fact: 'frame.entries', whom: 'frame-maker' };
 const askRider = (fact: string): AskNeed => ({ fact, whom: 'rider' });
 
-/** Whether this entry speaks for the rider's bike: "no" for another year, size or chip; "unsure" when not told. */
-export function entryApplies(
-  trial: Pick<Trial, 'frame' | 'rider'>,
-  entry: SheetEntry,
-): 'yes' | 'no' | 'unsure' {
-  const { rider, frame } = trial;
-  const others = frame.entries.filter((other) => other !== entry);
-  const years = entry.modelYears;
-  if (years && rider.modelYear !== null && (rider.modelYear < years.from || rider.modelYear > years.to))
-    return 'no';
-  if (entry.frameSizes && rider.frameSize !== null && !entry.frameSizes.includes(rider.frameSize))
-    return 'no';
-  if (entry.chip !== null && rider.chip !== null && entry.chip !== rider.chip) return 'no';
-  const differs = (read: (of: SheetEntry) => unknown): boolean =>
-    others.some((other) => JSON.stringify(read(other)) !== JSON.stringify(read(entry)));
-  if (rider.modelYear === null && years && differs((of) => of.modelYears)) return 'unsure';
-  // The chip can be turned by the rider; the size of a frame cannot.
-  if (rider.frameSize === null && entry.frameSizes && differs((of) => of.frameSizes)) return 'unsure';
-  return 'yes';
-}
-
 /** Eye-to-eye and stroke against one entry: by key, with no "close enough". */
 export function sizeChecks(trial: Trial): [CheckAnswer, CheckAnswer] {
-  const { entry, frame } = trial;
+  const { entry, frame, rider } = trial;
   if (frame.origin === 'described') return describedSize(trial);
-  const applies = entryApplies(trial, entry);
-  if (applies === 'no' || entry.sizeKey === null) {
+  const applies = trial.shared.applies.get(entry) ?? entryApplies(frame, rider, entry);
+  if (applies.state === 'no' || entry.sizeKey === null) {
     const ask = { figures: [figure('frame.size', entry.sizeKey, null, entry.source)], ask: [askMaker] };
     return [
       answer('eye-to-eye', 'unknown', 'size-no-entry-for-this-bike', ask),
@@ -40,12 +20,12 @@ export function sizeChecks(trial: Trial): [CheckAnswer, CheckAnswer] {
     ];
   }
   const [eye, stroke] = compare(trial, entry.sizeKey, false);
-  if (applies === 'unsure' && stroke.answer !== 'fail' && eye.answer !== 'fail') {
+  if (applies.state === 'unsure' && stroke.answer !== 'fail' && eye.answer !== 'fail') {
     return [
       eye,
       answer('stroke', 'unknown', 'stroke-depends-on-frame', {
         figures: stroke.figures,
-        ask: [askRider('rider.frameSize')],
+        ask: applies.missing.map((fact) => askRider(`rider.${fact}`)),
       }),
     ];
   }
@@ -88,7 +68,11 @@ function compare(trial: Trial, key: string, fromShock: boolean): [CheckAnswer, C
       answer('stroke', 'unknown', 'size-not-in-our-tables', ask),
     ];
   }
-  const spaced = shock.spacedToKeys.some((other) => sizeOf(other)?.key === wanted.key);
+  // A spacer shortens the stroke and nothing else, whatever a table may say.
+  const spaced =
+    shock.spacedToKeys.some((other) => sizeOf(other)?.key === wanted.key) &&
+    wanted.eyeToEyeMm === offered.eyeToEyeMm &&
+    wanted.strokeMm < offered.strokeMm;
   if (wanted.key === offered.key || spaced) {
     const kind: AnswerKind = fromShock ? 'work' : 'pass';
     return [
@@ -124,6 +108,6 @@ function compare(trial: Trial, key: string, fromShock: boolean): [CheckAnswer, C
 
 /** The wheel travel a stroke would give at the entry's mean leverage, for the sentence of a refusal. */
 function travelWith({ entry }: Trial, strokeMm: number, ownStrokeMm: number) {
-  if (entry.travelMm === null) return null;
+  if (!positive(entry.travelMm)) return null;
   return figure('computed.travel', (entry.travelMm / ownStrokeMm) * strokeMm, 'mm', computed);
 }

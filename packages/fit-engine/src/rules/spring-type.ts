@@ -23,7 +23,10 @@ export function springTypeCheck({ frame, shock }: Trial): CheckAnswer {
   });
 }
 
-/** A yoke puts side load on the shaft: a coil there needs the frame maker's word. */
+/**
+ * A yoke puts side load on the shaft: a coil there needs the frame maker's word. Decisions: a refusal wins even
+ * where the yoke is not known; a permission speaks of a yoke, so it counts only where there is known to be one.
+ */
 export function coilOnYokeCheck(trial: Trial): CheckAnswer {
   const { frame, shock } = trial;
   if (shock.spring.kind === 'air') return answer('coil-on-yoke', 'pass', 'coil-on-yoke-not-a-coil');
@@ -32,12 +35,12 @@ export function coilOnYokeCheck(trial: Trial): CheckAnswer {
   const figures = word ? [figure('frame.coilOnYoke', word.value, null, word.source)] : [];
   if (yokes.every((yoke) => yoke === false)) return answer('coil-on-yoke', 'pass', 'coil-on-yoke-no-yoke');
   if (word?.value === 'refused') return answer('coil-on-yoke', 'fail', 'coil-on-yoke-refused', { figures });
+  if (!yokes.includes(true)) {
+    const ask = [{ fact: yokes[0] === null ? 'entry.frameEnd' : 'entry.linkEnd', whom: 'rider' }] as const;
+    return answer('coil-on-yoke', 'unknown', 'coil-on-yoke-yoke-not-known', { figures, ask });
+  }
   if (word?.value === 'allowed') return answer('coil-on-yoke', 'pass', 'coil-on-yoke-allowed', { figures });
-  return yokes.includes(true)
-    ? answer('coil-on-yoke', 'unknown', 'coil-on-yoke-no-word', {
-        ask: [{ fact: 'frame.coilOnYoke', whom: 'frame-maker' }],
-      })
-    : answer('coil-on-yoke', 'unknown', 'coil-on-yoke-yoke-not-known', {
-        ask: [{ fact: 'entry.linkEnd', whom: 'rider' }],
-      });
+  return answer('coil-on-yoke', 'unknown', 'coil-on-yoke-no-word', {
+    ask: [{ fact: 'frame.coilOnYoke', whom: 'frame-maker' }],
+  });
 }

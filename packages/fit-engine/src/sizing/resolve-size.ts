@@ -21,6 +21,9 @@ export interface SizeResult {
 const limitsMm = [2, 1, 3] as const;
 const settledShare = 0.95;
 const publishedShare = 0.9;
+/** Standard uncertainties beyond which no size explains a reading, and beyond which it conflicts with a published one. */
+const noSuchSizeAt = 4;
+const conflictAt = 3;
 
 type Readings = Pick<PresentShock, ReadingName>;
 const names: readonly ReadingName[] = ['eyeToEye', 'compressed', 'shaftTravel'];
@@ -30,8 +33,30 @@ const usable = (reading: Reading | null): reading is Reading =>
 /** How far a reading lies from what a size allows, mm, at the kindest B within its limit. */
 function missMm(name: ReadingName, mm: number, size: Size): number {
   if (name === 'eyeToEye') return Math.abs(mm - size.eyeToEyeMm);
-  const bump = name === 'compressed' ? mm - (size.eyeToEyeMm - size.strokeMm) : size.strokeMm - mm;
+  const bump = bumpOf(name, mm, size);
   return Math.max(0, -bump, bump - limitsMm[0]);
+}
+
+/** The B that a closed reading alone would mean for a size, mm. */
+const bumpOf = (name: 'compressed' | 'shaftTravel', mm: number, size: Size): number =>
+  name === 'compressed' ? mm - (size.eyeToEyeMm - size.strokeMm) : size.strokeMm - mm;
+
+/** Whether some reading lies more than so many uncertainties from a size, at the one B that suits both closed readings best. */
+function ruledOut(readings: Readings, size: Size, uncertainties: number): boolean {
+  const far = (miss: number, reading: Reading): boolean =>
+    Math.abs(miss) > uncertainties * readingUncertaintyMm(reading) + 1e-9;
+  const { eyeToEye } = readings;
+  if (usable(eyeToEye) && far(eyeToEye.mm - size.eyeToEyeMm, eyeToEye)) return true;
+  const closed = (['compressed', 'shaftTravel'] as const).flatMap((name) => {
+    const reading = readings[name];
+    if (!usable(reading)) return [];
+    return [{ reading, bump: bumpOf(name, reading.mm, size), weight: readingUncertaintyMm(reading) ** -2 }];
+  });
+  if (closed.length === 0) return false;
+  const sum = closed.reduce((total, { weight }) => total + weight, 0);
+  const mean = closed.reduce((total, { bump, weight }) => total + bump * weight, 0) / sum;
+  const best = Math.min(Math.max(mean, 0), limitsMm[0]);
+  return closed.some(({ reading, bump }) => far(bump - best, reading));
 }
 
 function logLikelihood(readings: Readings, size: Size, limit: number): number {
@@ -50,12 +75,12 @@ function logLikelihood(readings: Readings, size: Size, limit: number): number {
   return open + logMeanExp(closed, 0, limit);
 }
 
-function logPriors(candidates: readonly Size[], published: readonly string[] | null): number[] {
-  const listed = candidates.filter((size) => published?.includes(size.key)).length;
+function logPriors(candidates: readonly Size[], published: ReadonlySet<string>): number[] {
+  const listed = candidates.filter((size) => published.has(size.key)).length;
   const others = candidates.length - listed;
   return candidates.map((size) => {
     if (listed === 0) return -Math.log(candidates.length);
-    if (published?.includes(size.key)) return Math.log((others === 0 ? 1 : publishedShare) / listed);
+    if (published.has(size.key)) return Math.log((others === 0 ? 1 : publishedShare) / listed);
     return Math.log((1 - publishedShare) / others);
   });
 }
@@ -73,9 +98,11 @@ export function resolveSize(
 ): SizeResult {
   const readings: Readings = present;
   const given = names.filter((name) => usable(readings[name]));
-  const conflicts = conflictsWith(readings, given, published);
+  const listed = (published ?? []).map(sizeOf).filter((size) => size !== null);
+  const conflicts = conflictsWith(readings, given, listed);
   const printed = present.printedSizeKey === null ? null : sizeOf(present.printedSizeKey);
-  if (printed) return fromPrint(printed, readings, given, conflicts);
+  const candidates = sizes.filter((size) => ofFamily(size, family));
+  if (printed) return fromPrint(printed, candidates.includes(printed), readings, given, conflicts);
   const none: SizeResult = {
     state: 'nothing-yet',
     sizeKey: null,
@@ -86,11 +113,7 @@ export function resolveSize(
   };
   if (given.length === 0) return none;
 
-  // Inch sizes were made with either mount; the trunnion tables are their own.
-  const candidates = sizes.filter(
-    (size) => !family || size.family === family || (family === 'eyelet' && size.family === 'inch'),
-  );
-  const priors = logPriors(candidates, published);
+  const priors = logPriors(candidates, new Set(listed.map(({ key }) => key)));
   const sharesBy = limitsMm.map((limit) =>
     sharesFromLogs(candidates.map((size, i) => (priors[i] ?? 0) + logLikelihood(readings, size, limit))),
   );
@@ -107,11 +130,9 @@ export function resolveSize(
     .filter(({ share }) => share >= 0.005)
     .slice(0, 6)
     .map(({ size, share }) => ({ sizeKey: size.key, share }));
-  const missed = given.some((name) => {
-    const reading = readings[name];
-    return reading && missMm(name, reading.mm, best.size) > 4 * readingUncertaintyMm(reading);
-  });
-  if (missed) return { ...none, state: 'no-such-size', candidates: shown, measureNext: again(given) };
+  if (ruledOut(readings, best.size, noSuchSizeAt)) {
+    return { ...none, state: 'no-such-size', candidates: shown, measureNext: again(given) };
+  }
   if (best.least >= settledShare) {
     return { ...none, state: 'settled', sizeKey: best.size.key, candidates: shown, measureNext: null };
   }
@@ -123,22 +144,31 @@ export function resolveSize(
   };
 }
 
-/** Data printed on the shock come first, unless a reading rules them out: then nothing is settled. */
+/** Sizes from inches are eyelet shocks; the trunnion tables are their own. */
+const ofFamily = (size: Size, family: 'eyelet' | 'trunnion' | null): boolean =>
+  !family || size.family === family || (family === 'eyelet' && size.family === 'inch');
+
+/**
+ * Data printed on the shock come first. A reading more than 3 u away, or mounts that the size never has, speak
+ * against the print: then nothing is settled, since a wrong label would pass for the maker's word.
+ */
 function fromPrint(
   printed: Size,
+  mountsAgree: boolean,
   readings: Readings,
   given: readonly ReadingName[],
   conflicts: SizeResult['conflicts'],
 ): SizeResult {
-  const against = given.find((name) => {
+  const against = !mountsAgree || ruledOut(readings, printed, conflictAt);
+  const alone = given.find((name) => {
     const reading = readings[name];
-    return reading && missMm(name, reading.mm, printed) > 4 * readingUncertaintyMm(reading);
+    return reading && missMm(name, reading.mm, printed) > conflictAt * readingUncertaintyMm(reading);
   });
   return {
     state: against ? 'measure-again' : 'settled',
     sizeKey: against ? null : printed.key,
     candidates: [{ sizeKey: printed.key, share: against ? 0.5 : 1 }],
-    measureNext: against ? (against === 'eyeToEye' ? 'eye-to-eye' : 'stroke-compressed') : null,
+    measureNext: !against ? null : alone === 'eyeToEye' || !alone ? 'eye-to-eye' : 'stroke-compressed',
     conflicts,
     fromPrint: true,
   };
@@ -147,29 +177,40 @@ function fromPrint(
 const again = (given: readonly ReadingName[]): SizeResult['measureNext'] =>
   given.includes('eyeToEye') ? 'eye-to-eye' : 'stroke-compressed';
 
-/** The reading that would part the two leading sizes best. */
+/**
+ * The reading that would part the two leading sizes best: the difference it would show over the uncertainty of a
+ * caliper reading; B (standard deviation of a uniform 0 to 2 mm) blurs the closed ones. A second reading by the same
+ * careful means adds half as much. Extended less compressed goes before an O-ring, which shows only the used stroke.
+ */
 function separates(a: Size, b: Size, readings: Readings): SizeResult['measureNext'] {
-  if (!usable(readings.eyeToEye)) return 'eye-to-eye';
-  const apart = Math.abs(a.eyeToEyeMm - b.eyeToEyeMm);
-  const strokeApart = Math.abs(a.strokeMm - b.strokeMm);
-  const noStroke = !usable(readings.compressed) && !usable(readings.shaftTravel);
-  if (apart > strokeApart && !noStroke) return 'eye-to-eye';
-  // Extended less compressed says more than an O-ring, which may never have been pushed to the end.
-  return 'stroke-compressed';
+  const caliper = readingUncertaintyMm({ mm: 0, tool: 'caliper', awkward: false });
+  const blurred = Math.hypot(caliper, limitsMm[0] / Math.sqrt(12));
+  const fresh = (name: ReadingName): number => {
+    const reading = readings[name];
+    return usable(reading) && readingUncertaintyMm(reading) <= caliper ? 0.5 : 1;
+  };
+  const closedApart = Math.abs(a.eyeToEyeMm - a.strokeMm - b.eyeToEyeMm + b.strokeMm);
+  const ways = [
+    ['eye-to-eye', (fresh('eyeToEye') * Math.abs(a.eyeToEyeMm - b.eyeToEyeMm)) / caliper],
+    ['stroke-compressed', (fresh('compressed') * closedApart) / blurred],
+    ['stroke-shaft', (fresh('shaftTravel') * Math.abs(a.strokeMm - b.strokeMm)) / blurred],
+  ] as const;
+  return ways.reduce((best, way) => (way[1] > best[1] + 1e-9 ? way : best))[0];
 }
 
 function conflictsWith(
   readings: Readings,
   given: readonly ReadingName[],
-  published: readonly string[] | null,
+  listed: readonly Size[],
 ): SizeResult['conflicts'] {
-  const listed = (published ?? []).map(sizeOf).filter((size) => size !== null);
   if (listed.length === 0) return [];
   return given.flatMap((name) => {
     const reading = readings[name];
     if (!reading) return [];
-    const nearest = [...listed].sort((a, b) => missMm(name, reading.mm, a) - missMm(name, reading.mm, b))[0];
-    if (!nearest || missMm(name, reading.mm, nearest) <= 3 * readingUncertaintyMm(reading)) return [];
+    const nearest = listed.reduce((best, size) =>
+      missMm(name, reading.mm, size) < missMm(name, reading.mm, best) ? size : best,
+    );
+    if (missMm(name, reading.mm, nearest) <= conflictAt * readingUncertaintyMm(reading)) return [];
     return [{ reading: name, mm: reading.mm, nearestPublished: nearest.key }];
   });
 }

@@ -1,4 +1,4 @@
-import { parseNumber } from '../units/parse.js';
+import { parseNumber } from '../units/parse-number.js';
 import { mmPerIn } from '../units/factors.js';
 
 export interface Size {
@@ -64,7 +64,7 @@ export const sizeOf = (key: string): Size | null => byKey.get(key) ?? null;
 export function findSizeKey(text: string): string | null {
   const parts = text
     .toLowerCase()
-    .replace(/["”″']|mm|in(ch(es)?)?\b/g, ' ')
+    .replace(/["”″]|(?<![a-z])(mm|inch(es)?|in)(?![a-wyz])/g, ' ')
     .split(/[x×*]/);
   if (parts.length !== 2) return null;
   const numbers = parts.map((part) => parseNumber(part.trim().replace(/\s+/g, ' ')));

@@ -1,5 +1,5 @@
 import type { AirChambers } from '../facts.js';
-import type { Curve } from '../kinematics/leverage-curve.js';
+import type { Curve } from '../kinematics/curve.js';
 import { equilibrium, type SagState } from './equilibrium.js';
 
 /**

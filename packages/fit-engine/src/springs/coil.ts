@@ -1,4 +1,4 @@
-import type { Curve } from '../kinematics/leverage-curve.js';
+import type { Curve } from '../kinematics/curve.js';
 import { equilibrium, type SagState } from './equilibrium.js';
 
 /**

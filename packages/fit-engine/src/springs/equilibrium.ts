@@ -1,4 +1,4 @@
-import type { Curve } from '../kinematics/leverage-curve.js';
+import type { Curve } from '../kinematics/curve.js';
 
 export type SagState =
   { state: 'ok'; sagMm: number } | { state: 'topped-out' } | { state: 'bottomed' } | { state: 'no-answer' };

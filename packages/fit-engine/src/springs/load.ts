@@ -17,6 +17,8 @@ export interface SagWindow {
   lowPercent: number;
   highPercent: number;
   midPercent: number;
+  /** From the frame's sheet, not from the style. */
+  printed: boolean;
 }
 
 /** Sag at the shock by style (common practice). */
@@ -27,12 +29,20 @@ const windows: Record<RidingStyle, readonly [number, number]> = {
   downhill: [30, 35],
 };
 
-/** The sag to aim for, % of stroke at the shock; a printed target wins and means +/- 2 points. */
+/**
+ * The sag to aim for, % of stroke at the shock; a printed target wins and means +/- 2 points. A target that no
+ * suspension has (outside 5 to 60 %) is a slip and counts as not printed. Null where the style is not known.
+ */
 export function sagWindow(style: RidingStyle | null, printedPercent: number | null): SagWindow | null {
-  if (printedPercent !== null) {
-    return { lowPercent: printedPercent - 2, highPercent: printedPercent + 2, midPercent: printedPercent };
+  if (printedPercent !== null && printedPercent >= 5 && printedPercent <= 60) {
+    return {
+      lowPercent: printedPercent - 2,
+      highPercent: printedPercent + 2,
+      midPercent: printedPercent,
+      printed: true,
+    };
   }
   if (!style) return null;
   const [lowPercent, highPercent] = windows[style];
-  return { lowPercent, highPercent, midPercent: (lowPercent + highPercent) / 2 };
+  return { lowPercent, highPercent, midPercent: (lowPercent + highPercent) / 2, printed: false };
 }

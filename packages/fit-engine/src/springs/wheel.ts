@@ -1,4 +1,4 @@
-import type { Curve } from '../kinematics/leverage-curve.js';
+import type { Curve } from '../kinematics/curve.js';
 
 /** Vertical force at the wheel, N, by virtual work without friction. */
 export const wheelForceN = (curve: Curve, shockMm: number, shockForceN: number): number =>

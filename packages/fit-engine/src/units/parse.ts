@@ -1,38 +1,50 @@
+import { parseNumber } from './parse-number.js';
 import { kgPerLb, kgPerStone, kPaPerBar, kPaPerPsi, mmPerIn } from './factors.js';
 
-/** A plain number with a dot or a decimal comma, a fraction ("7/8") or a mixed number ("7 7/8"); null for anything else. */
-export function parseNumber(text: string): number | null {
-  const clean = text.trim().replace(',', '.');
-  const mixed = /^(?:(\d+)[\s-]+)?(\d+)\/(\d+)$/.exec(clean);
-  if (mixed) {
-    const denominator = Number(mixed[3]);
-    return denominator === 0 ? null : Number(mixed[1] ?? 0) + Number(mixed[2]) / denominator;
-  }
-  return /^\d+(\.\d+)?$|^\.\d+$/.test(clean) ? Number(clean) : null;
-}
+export { parseNumber };
 
 type Units = Readonly<Record<string, number>>;
 
 function parseWithUnit(text: string, units: Units, fallback: string): number | null {
-  const match = /^(.*?\d)\s*([a-z"”″′']*)$/i.exec(text.trim());
-  const factor = units[(match?.[2] || fallback).toLowerCase()];
+  const match = /^(.*?[\d¼½¾⅛⅜⅝⅞])\s*([a-z"”″]*)\.?$/i.exec(text.trim());
+  const name = (match?.[2] || fallback).toLowerCase();
+  const factor = Object.hasOwn(units, name) ? units[name] : undefined;
   const value = match?.[1] === undefined ? null : parseNumber(match[1]);
-  return value === null || factor === undefined ? null : value * factor;
+  return value === null || factor === undefined || !Number.isFinite(value * factor) ? null : value * factor;
 }
 
 /** mm from "209.6", "7.875 in", `7 7/8"`, "20,5 cm". @param unit what a bare number means */
 export const parseLengthMm = (text: string, unit: 'mm' | 'in' = 'mm'): number | null =>
   parseWithUnit(
     text,
-    { mm: 1, cm: 10, in: mmPerIn, inch: mmPerIn, '"': mmPerIn, '”': mmPerIn, '″': mmPerIn },
+    { mm: 1, cm: 10, in: mmPerIn, inch: mmPerIn, inches: mmPerIn, '"': mmPerIn, '”': mmPerIn, '″': mmPerIn },
     unit,
   );
 
 /** kg from "80", "176 lb", "12 st", "11 st 6", "11st 6lb". @param unit what a bare number means */
 export function parseMassKg(text: string, unit: 'kg' | 'lb' | 'st' = 'kg'): number | null {
-  const stones = /^(\d+)\s*st(?:one)?\s*(\d+(?:[.,]\d+)?)\s*(?:lbs?)?$/i.exec(text.trim());
-  if (stones) return Number(stones[1]) * kgPerStone + Number(stones[2]?.replace(',', '.')) * kgPerLb;
-  return parseWithUnit(text, { kg: 1, lb: kgPerLb, lbs: kgPerLb, st: kgPerStone, stone: kgPerStone }, unit);
+  const stones = /^(\d{1,3})\s*st(?:ones?)?\.?[\s,]*(\d{1,2}(?:[.,]\d{1,6})?)\s*(?:lbs?)?\.?$/i.exec(
+    text.trim(),
+  );
+  if (stones) {
+    const pounds = Number(stones[2]?.replace(',', '.'));
+    // Fourteen pounds are a stone: "11 st 16" is a slip, not twelve stone two.
+    return pounds < 14 ? Number(stones[1]) * kgPerStone + pounds * kgPerLb : null;
+  }
+  return parseWithUnit(
+    text,
+    {
+      kg: 1,
+      kgs: 1,
+      g: 0.001,
+      lb: kgPerLb,
+      lbs: kgPerLb,
+      st: kgPerStone,
+      stone: kgPerStone,
+      stones: kgPerStone,
+    },
+    unit,
+  );
 }
 
 /** kPa from "12.1 bar", "220psi", "830 kPa". @param unit what a bare number means */

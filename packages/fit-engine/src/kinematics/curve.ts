@@ -1,0 +1,38 @@
+/** Leverage ratio over shock travel. All arguments in mm of shock travel, held within 0 and the stroke. */
+export interface Curve {
+  strokeMm: number;
+  ratioAt(shockMm: number): number;
+  /** dLR/ds, 1/mm. */
+  slopeAt(shockMm: number): number;
+  wheelTravelAt(shockMm: number): number;
+  /** The inverse: shock travel at a wheel travel, mm, within a nanometre; held within 0 and the ends. */
+  shockTravelAt(wheelMm: number): number;
+  totalTravelMm: number;
+  meanRatio: number;
+  /** (start - end) / start, %; null where only travel and stroke are known. */
+  progressionPercent: number | null;
+  progressionToLowestPercent: number | null;
+  /** Made of travel and stroke alone. */
+  constant: boolean;
+  /** The table agrees with the published travel (or, by wheel travel, with the stroke) within 3 %. */
+  usableForAdvice: boolean;
+}
+
+export const within = (value: number, end: number): number => Math.min(Math.max(value, 0), end);
+
+/**
+ * Where a rising function reaches a value, by bisection kept going until the interval is a nanometre (at most 60
+ * halvings); held at the ends.
+ */
+export function inverseOf(rising: (x: number) => number, value: number, end: number): number {
+  if (Number.isNaN(value)) return NaN;
+  if (!(value > 0)) return 0;
+  if (value >= rising(end)) return end;
+  let [low, high] = [0, end];
+  for (let i = 0; i < 60 && high - low > 1e-9; i += 1) {
+    const mid = (low + high) / 2;
+    if (rising(mid) < value) low = mid;
+    else high = mid;
+  }
+  return (low + high) / 2;
+}
