@@ -82,21 +82,23 @@ export class CheckoutService {
     { contact }: CheckoutBody,
   ): Promise<Order> {
     const now = this.clock.now();
-    const order = await manager.save(Order, {
-      reference: newReference(),
-      planId: prepared.planId,
-      measureUpId: prepared.measureUpId,
-      state: 'held' as const,
-      fit: prepared.fit,
-      email: contact.email,
-      contact,
-      job: { ...prepared.job, title: prepared.title, shockName: prepared.shockName },
-      currency: prepared.currency,
-      totalMinor: prepared.totalMinor,
-      holdExpiresAt: new Date(now.getTime() + this.config.HOLD_MINUTES * 60_000),
-      createdAt: now,
-      version: 1,
-    });
+    const order = await manager.save(
+      manager.create(Order, {
+        reference: newReference(),
+        planId: prepared.planId,
+        measureUpId: prepared.measureUpId,
+        state: 'held' as const,
+        fit: prepared.fit,
+        email: contact.email,
+        contact,
+        job: { ...prepared.job, title: prepared.title, shockName: prepared.shockName },
+        currency: prepared.currency,
+        totalMinor: prepared.totalMinor,
+        holdExpiresAt: new Date(now.getTime() + this.config.HOLD_MINUTES * 60_000),
+        createdAt: now,
+        version: 1,
+      }),
+    );
     await this.takeStock(manager, prepared, order);
     await this.takeSlot(manager, prepared, order);
     await this.writeLines(manager, prepared, order, contact);

@@ -104,15 +104,17 @@ export class OrderLifecycle {
     for (const standId of slot.standIds) {
       await manager.query('SAVEPOINT stand');
       try {
-        const booking = await manager.save(Booking, {
-          orderId: order.id,
-          workshopId: slot.workshopId,
-          standId,
-          during: toRangeText(slot),
-          state,
-          calendarUid: `${randomUUID()}@linkfell`,
-          createdAt: this.clock.now(),
-        });
+        const booking = await manager.save(
+          manager.create(Booking, {
+            orderId: order.id,
+            workshopId: slot.workshopId,
+            standId,
+            during: toRangeText(slot),
+            state,
+            calendarUid: `${randomUUID()}@linkfell`,
+            createdAt: this.clock.now(),
+          }),
+        );
         await manager.query('RELEASE SAVEPOINT stand');
         return booking;
       } catch (error) {
