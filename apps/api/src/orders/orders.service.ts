@@ -54,7 +54,7 @@ export class OrdersService {
       manager.find(OrderLine, { where: { orderId: order.id }, order: { position: 'ASC' } }),
       manager.find(Parcel, { where: { orderId: order.id }, relations: { shop: true } }),
       manager.findOneBy(Payment, { orderId: order.id }),
-      manager.find(Booking, { where: { orderId: order.id }, order: { createdAt: 'DESC' }, take: 1 }),
+      manager.find(Booking, { where: { orderId: order.id }, order: { createdAt: 'DESC' } }),
     ]);
     const sellers = await manager.find(Organisation, {
       where: { id: In([...new Set(lines.map((line) => line.sellerId))]) },
@@ -62,7 +62,8 @@ export class OrdersService {
       order: { name: 'ASC' },
     });
     // A fitting that was given up for self-fit is history, not this order's booking.
-    const booking = order.fit === 'workshop' ? (bookings[0] ?? null) : null;
+    const current = bookings.find(({ state }) => ['requested', 'accepted', 'fitted'].includes(state));
+    const booking = order.fit === 'workshop' ? (current ?? bookings[0] ?? null) : null;
     const workshop = booking
       ? await manager.findOneOrFail(Organisation, {
           where: { id: booking.workshopId },
