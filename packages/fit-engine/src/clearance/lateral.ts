@@ -2,5 +2,5 @@
 const sideMm = 2;
 
 /** Whether a can or coil has its room across; exactly 2 mm each side passes, whatever binary fractions say. */
-export const lateralOk = (diameterMm: number, tunnelMm: number): boolean =>
-  Math.round((tunnelMm - diameterMm - 2 * sideMm) * 1000) >= 0;
+export const lateralOk = (diameterMm: number, tunnelMm: number, marginMm = sideMm): boolean =>
+  Number.isFinite(tunnelMm) && Math.round((tunnelMm - diameterMm - 2 * marginMm) * 1000) >= 0;

@@ -45,6 +45,7 @@ export function curveForSprings(
 function constantCurve(travelMm: number | null, strokeMm: number): CurveResult {
   if (travelMm === null) return { ok: false, reason: 'no-travel' };
   const ratio = travelMm / strokeMm;
+  if (!Number.isFinite(ratio)) return { ok: false, reason: 'bad-stroke' };
   return {
     ok: true,
     curve: {

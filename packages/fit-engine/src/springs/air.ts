@@ -1,35 +1,29 @@
 import type { AirChambers } from '../facts.js';
 import type { Curve } from '../kinematics/curve.js';
+import { filledState, movedState, stateForceN, stateStiffnessNPerMm } from './air-state.js';
 import { equilibrium, type SagState } from './equilibrium.js';
 
 /**
  * Force of a two-chamber air spring, N: p = p0 (V0/V)^n absolute in both chambers, filled alike at full extension.
- * Chambers in mm2 and mm3, pressures in kPa absolute, s in mm; n = 1 slow, 1.35 fast.
+ * Chambers in mm2 and mm3, pressures in kPa absolute, s in mm; n = 1 slow, 1.35 fast. NaN where no air is left.
  */
-export function airForceN(
+export const airForceN = (
   c: AirChambers,
   shockMm: number,
   fillAbsKPa: number,
   patmKPa: number,
   n: number,
   gasN = 0,
-): number {
-  const positive = fillAbsKPa * (c.volumeMm3 / (c.volumeMm3 - c.areaMm2 * shockMm)) ** n;
-  const negative =
-    fillAbsKPa * (c.negativeVolumeMm3 / (c.negativeVolumeMm3 + c.negativeAreaMm2 * shockMm)) ** n;
-  return (c.areaMm2 * (positive - patmKPa) - c.negativeAreaMm2 * (negative - patmKPa)) / 1000 + gasN;
-}
+): number => stateForceN(movedState(filledState(c, fillAbsKPa), shockMm, n), patmKPa) + gasN;
 
 /** Stiffness dF/ds, N/mm, of the same spring. */
-export function airStiffnessNPerMm(c: AirChambers, shockMm: number, fillAbsKPa: number, n: number): number {
-  const vp = c.volumeMm3 - c.areaMm2 * shockMm;
-  const vn = c.negativeVolumeMm3 + c.negativeAreaMm2 * shockMm;
-  const pp = fillAbsKPa * (c.volumeMm3 / vp) ** n;
-  const pn = fillAbsKPa * (c.negativeVolumeMm3 / vn) ** n;
-  return (n * (c.areaMm2 ** 2 * (pp / vp) + c.negativeAreaMm2 ** 2 * (pn / vn))) / 1000;
-}
+export const airStiffnessNPerMm = (c: AirChambers, shockMm: number, fillAbsKPa: number, n: number): number =>
+  stateStiffnessNPerMm(movedState(filledState(c, fillAbsKPa), shockMm, n), n);
 
-/** Fill pressure for a sag, kPa gauge: linear in the pressure, so no search. Null when no positive pressure does it. */
+/**
+ * Fill pressure for a sag, kPa gauge: linear in the pressure, so no search. Null when no positive pressure does it,
+ * or the chambers cannot be true.
+ */
 export function fillForSag(
   c: AirChambers,
   curve: Curve,
@@ -38,13 +32,12 @@ export function fillForSag(
   patmKPa: number,
   gasN = 0,
 ): number | null {
-  const vp = c.volumeMm3 - c.areaMm2 * sagMm;
-  const vn = c.negativeVolumeMm3 + c.negativeAreaMm2 * sagMm;
-  if (!(vp > 0) || !(sagMm >= 0) || sagMm > curve.strokeMm) return null;
-  const absolute =
-    (1000 * (loadN * curve.ratioAt(sagMm) - gasN) + (c.areaMm2 - c.negativeAreaMm2) * patmKPa) /
-    ((c.areaMm2 * c.volumeMm3) / vp - (c.negativeAreaMm2 * c.negativeVolumeMm3) / vn);
-  const gauge = absolute - patmKPa;
+  if (!(sagMm >= 0) || sagMm > curve.strokeMm) return null;
+  // Force per kPa of fill, so that nothing is worked out twice in two ways.
+  const perKPa = stateForceN(movedState(filledState(c, 1), sagMm, 1), 0);
+  if (!(perKPa > 0)) return null;
+  const neededN = loadN * curve.ratioAt(sagMm) - gasN + ((c.areaMm2 - c.negativeAreaMm2) * patmKPa) / 1000;
+  const gauge = neededN / perKPa - patmKPa;
   return Number.isFinite(gauge) && gauge > 0 ? gauge : null;
 }
 
@@ -61,7 +54,7 @@ export const sagForFill = (
 /**
  * The least fill that any shock of this outside diameter could need, kPa gauge, when its chambers are not known:
  * piston area at most pi/4 (diameter - 4 mm)^2, chamber ratio at least 1 - 0.75 x sag fraction, no negative chamber,
- * no gas (common practice for the bounds).
+ * no gas (common practice for the bounds). Null for a diameter that leaves no room for a piston.
  */
 export function leastFillKPa(
   diameterMm: number,
@@ -70,8 +63,10 @@ export function leastFillKPa(
   softestSagPercent: number,
   patmKPa: number,
 ): number | null {
+  if (!(diameterMm > 4) || !Number.isFinite(diameterMm)) return null;
   const area = (Math.PI / 4) * (diameterMm - 4) ** 2;
   const fraction = softestSagPercent / 100;
+  if (!(fraction >= 0 && fraction <= 1)) return null;
   const force = loadN * curve.ratioAt(fraction * curve.strokeMm);
   const gauge = ((1000 * force) / area + patmKPa) * (1 - 0.75 * fraction) - patmKPa;
   return Number.isFinite(gauge) ? Math.max(gauge, 0) : null;

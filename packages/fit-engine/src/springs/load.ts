@@ -9,9 +9,16 @@ export interface LoadShares {
 }
 export const usualShares: LoadShares = { rearShare: 0.6, sprungShare: 0.6 };
 
-/** Static vertical load on the rear wheel, N. */
-export const wheelLoadN = (riderKg: number, kitKg: number, bikeKg: number, shares = usualShares): number =>
-  g0 * (riderKg + kitKg + shares.sprungShare * bikeKg) * shares.rearShare;
+/** Static vertical load on the rear wheel, N. A share that is not given is the usual one. */
+export function wheelLoadN(
+  riderKg: number,
+  kitKg: number,
+  bikeKg: number,
+  shares: Partial<LoadShares> = {},
+): number {
+  const { rearShare, sprungShare } = { ...usualShares, ...shares };
+  return g0 * (riderKg + kitKg + sprungShare * bikeKg) * rearShare;
+}
 
 export interface SagWindow {
   lowPercent: number;
