@@ -1,61 +1,84 @@
-import type { Judgement } from './answers.js';
-import type { FitQuestion } from './facts.js';
+import type { CheckAnswer, Judgement } from './answers.js';
+import type { FitQuestion, ShockFacts } from './facts.js';
+import { judge } from './judge.js';
+import { insteadSentences, type InsteadCode } from './messages/instead.en.js';
 
-/** What would fit instead of a refused shock, the smallest change for each reason of refusal. */
-export function whatWouldFit({ frame, shock }: FitQuestion, judgement: Judgement): string[] {
-  const said = new Set<string>();
-  const listed = [...new Set(frame.entries.flatMap((entry) => entry.sizeKey ?? []))];
-  for (const { check, answer: kind, code } of judgement.answers) {
-    if (kind !== 'fail') continue;
-    switch (check) {
-      case 'eye-to-eye':
-      case 'stroke':
-        if (listed.length > 0) said.add(`A shock of size ${listed.join(' or ')}.`);
-        break;
-      case 'mounts':
-        said.add('The same size with the mounts that the frame asks for.');
-        break;
-      case 'spring-type':
-        said.add(
-          code === 'spring-type-air-only' ? 'An air shock of this size.' : 'A coil shock of this size.',
-        );
-        break;
-      case 'coil-on-yoke':
-        said.add('An air shock of this size.');
-        break;
-      case 'reservoir':
-        said.add('An inline shock of this size.');
-        break;
-      case 'diameter':
-        said.add('A shock with a narrower body.');
-        break;
-      case 'spring-rate':
-      case 'pressure':
-        said.add(
-          shock.spring.kind === 'coil'
-            ? 'An air shock of this size.'
-            : 'An air shock with other pressure limits, or a coil where the maker allows it.',
-        );
-        break;
-      case 'remote':
-        said.add(code === 'remote-wanted-has-none' ? 'A shock with a remote.' : 'A shock without a remote.');
-        break;
-      case 'e-bike':
-        said.add('A shock that its maker allows on e-bikes.');
-        break;
-      case 'rider-weight':
-        said.add('A shock with a higher weight limit.');
-        break;
-      case 'position':
-        said.add('A shock that may go in the other way round.');
-        break;
-      case 'notices':
-        said.add('Nothing until the maker’s notice has been dealt with.');
-        break;
-      case 'hardware':
-      case 'reading-conflict':
-        break;
-    }
-  }
-  return [...said];
+/** A change that would take one reason of refusal away. */
+export interface Instead {
+  code: InsteadCode;
+  /** Sizes that the sheet lists, for "instead-listed-size". */
+  sizeKeys: readonly string[];
+  /** Tried with this shock otherwise unchanged: nothing else refuses it then. Null where only a real shock can tell. */
+  enough: boolean | null;
 }
+
+function codeFor({ check, code }: CheckAnswer, shock: ShockFacts): InsteadCode | null {
+  switch (check) {
+    case 'eye-to-eye':
+    case 'stroke':
+      return 'instead-listed-size';
+    case 'mounts':
+      return 'instead-mounts';
+    case 'spring-type':
+      return code === 'spring-type-air-only' ? 'instead-air' : 'instead-coil';
+    case 'coil-on-yoke':
+      return 'instead-air';
+    case 'reservoir':
+      return 'instead-inline';
+    case 'diameter':
+      return 'instead-narrower';
+    case 'spring-rate':
+    case 'pressure':
+      return shock.spring.kind === 'coil' ? 'instead-other-spring' : 'instead-other-pressure';
+    case 'remote':
+      return code === 'remote-wanted-has-none' ? 'instead-with-remote' : 'instead-without-remote';
+    case 'e-bike':
+      return 'instead-e-bike';
+    case 'rider-weight':
+      return 'instead-higher-limit';
+    case 'position':
+      return 'instead-other-way-round';
+    case 'notices':
+      return 'instead-after-notice';
+    case 'hardware':
+    case 'reading-conflict':
+      return null;
+  }
+}
+
+/** This shock with one change, where the change leaves nothing to guess; null where it would. */
+function changed(shock: ShockFacts, code: InsteadCode, sizeKey: string): ShockFacts | null {
+  if (code === 'instead-inline') return { ...shock, reservoir: null };
+  if (code === 'instead-without-remote') return { ...shock, remote: null };
+  return code === 'instead-listed-size' ? { ...shock, sizeKey, spacedToKeys: [] } : null;
+}
+
+/** The changes that would let a refused shock in: those that are enough alone first. Empty for any other verdict. */
+export function fitsInstead(question: FitQuestion, judgement: Judgement): Instead[] {
+  if (judgement.verdict !== 'wont-fit') return [];
+  const { frame, shock } = question;
+  const listed = [...new Set(frame.entries.flatMap((entry) => entry.sizeKey ?? []))];
+  const codes = judgement.answers.flatMap((given) =>
+    given.answer === 'fail' ? (codeFor(given, shock) ?? []) : [],
+  );
+  const lets = (code: InsteadCode, sizeKey: string): boolean | null => {
+    const other = changed(shock, code, sizeKey);
+    return other && judge({ ...question, shock: other }, { full: true }).verdict !== 'wont-fit';
+  };
+  const found = [...new Set(codes)].flatMap((code): Instead[] => {
+    if (code !== 'instead-listed-size') return [{ code, sizeKeys: [], enough: lets(code, shock.sizeKey) }];
+    const good = listed.filter((key) => lets(code, key));
+    if (listed.length === 0) return [];
+    return [{ code, sizeKeys: good.length > 0 ? good : listed, enough: good.length > 0 }];
+  });
+  const rank = (enough: boolean | null): number => (enough ? 0 : 1);
+  return found.sort((a, b) => rank(a.enough) - rank(b.enough));
+}
+
+export function tellInstead({ code, sizeKeys }: Instead): string {
+  return insteadSentences[code].replace('{sizes}', sizeKeys.join(' or '));
+}
+
+/** What would fit instead of a refused shock, in sentences. */
+export const whatWouldFit = (question: FitQuestion, judgement: Judgement): string[] =>
+  fitsInstead(question, judgement).map(tellInstead);

@@ -3,22 +3,34 @@ import { advise } from './advice.js';
 import type { FitQuestion, ShockFacts } from './facts.js';
 import { rankOf, worst, type Shared } from './rules/context.js';
 import { entryApplies } from './rules/entry-applies.js';
-import { better, runTrial } from './rules/run-trial.js';
+import { begin, compare, costOf, finish, type Begun, type Outcome } from './rules/run-trial.js';
 import { presentSize } from './sizing/present-size.js';
 
 const verdicts: readonly Verdict[] = ['bolts-straight-in', 'fits-with-work', 'needs-an-answer', 'wont-fit'];
 const ways = ['body-to-frame', 'body-to-link'] as const;
 
+/** The best outcome; a trial that could not beat the best so far even with room for the reservoir is not swept. */
+function bestOf(trials: readonly Begun[]): Outcome | null {
+  let best: (Outcome & { cost: number[] }) | null = null;
+  for (const begun of [...trials].sort(compare)) {
+    if (best && compare(best, begun) <= 0) break;
+    const outcome = finish(begun);
+    const costed = { ...outcome, cost: costOf(outcome.answers) };
+    if (!best || compare(costed, best) < 0) best = costed;
+  }
+  return best;
+}
+
 function judgeWith(question: FitQuestion, shared: Shared, full: boolean): Judgement {
   const { entries } = question.frame;
   // An entry for another year, size or chip position must neither save a shock nor condemn it.
   const speaking = entries.filter((entry) => shared.applies.get(entry)?.state !== 'no');
-  const outcomes = (speaking.length > 0 ? speaking : entries).flatMap((entry) =>
-    ways.map((wayRound) => runTrial({ ...question, shared, entry, wayRound, full })),
+  const trials = (speaking.length > 0 ? speaking : entries).flatMap((entry) =>
+    ways.map((wayRound) => begin({ ...question, shared, entry, wayRound, full })),
   );
-  const [first, ...others] = outcomes;
-  if (!first) throw new RangeError('a frame needs at least one entry');
-  const { answers, trial, spring, positionDeg } = others.reduce(better, first);
+  const best = bestOf(trials);
+  if (!best) throw new RangeError('a frame needs at least one entry');
+  const { answers, trial, spring, positionDeg } = best;
   const work = answers.flatMap((given) => given.work);
   return {
     verdict: verdicts[rankOf(worst(answers))] ?? 'wont-fit',

@@ -1,58 +1,72 @@
 import type { Point } from '../facts.js';
 
-const sub = (a: Point, b: Point): Point => [a[0] - b[0], a[1] - b[1]];
-const cross = (a: Point, b: Point): number => a[0] * b[1] - a[1] * b[0];
-
-function pointToSegment(p: Point, a: Point, b: Point): number {
-  const d = sub(b, a);
-  const length2 = d[0] ** 2 + d[1] ** 2;
-  const along = length2 === 0 ? 0 : ((p[0] - a[0]) * d[0] + (p[1] - a[1]) * d[1]) / length2;
-  const t = Math.min(1, Math.max(0, along));
-  return Math.hypot(p[0] - a[0] - t * d[0], p[1] - a[1] - t * d[1]);
+function pointToSegment2(px: number, py: number, ax: number, ay: number, bx: number, by: number): number {
+  const dx = bx - ax;
+  const dy = by - ay;
+  const length2 = dx * dx + dy * dy;
+  const along = length2 === 0 ? 0 : ((px - ax) * dx + (py - ay) * dy) / length2;
+  const t = along < 0 ? 0 : along > 1 ? 1 : along;
+  const x = px - ax - t * dx;
+  const y = py - ay - t * dy;
+  return x * x + y * y;
 }
 
-function segmentsCross(a: Point, b: Point, c: Point, d: Point): boolean {
-  const [ab, cd] = [sub(b, a), sub(d, c)];
-  const [c1, c2] = [cross(ab, sub(c, a)), cross(ab, sub(d, a))];
-  const [c3, c4] = [cross(cd, sub(a, c)), cross(cd, sub(b, c))];
-  return c1 * c2 < 0 && c3 * c4 < 0;
-}
-
-function segmentDistance(a: Point, b: Point, c: Point, d: Point): number {
-  if (segmentsCross(a, b, c, d)) return 0;
-  return Math.min(
-    pointToSegment(a, c, d),
-    pointToSegment(b, c, d),
-    pointToSegment(c, a, b),
-    pointToSegment(d, a, b),
-  );
+/** Whether two segments cross properly; touching is left to the distance, which is 0 then. */
+function cross(a: Point, b: Point, c: Point, d: Point): boolean {
+  const side = (p: Point, q: Point, r: Point): number =>
+    (q[0] - p[0]) * (r[1] - p[1]) - (q[1] - p[1]) * (r[0] - p[0]);
+  return side(a, b, c) * side(a, b, d) < 0 && side(c, d, a) * side(c, d, b) < 0;
 }
 
 /** Whether a point lies inside (even-odd rule). */
 function inside(p: Point, polygon: readonly Point[]): boolean {
   let within = false;
-  polygon.forEach((a, i) => {
-    const b = polygon[(i + 1) % polygon.length] as Point;
-    if (a[1] > p[1] !== b[1] > p[1] && p[0] < ((b[0] - a[0]) * (p[1] - a[1])) / (b[1] - a[1]) + a[0]) {
+  let a = polygon[polygon.length - 1];
+  for (const b of polygon) {
+    if (a && a[1] > p[1] !== b[1] > p[1] && p[0] < ((b[0] - a[0]) * (p[1] - a[1])) / (b[1] - a[1]) + a[0]) {
       within = !within;
     }
-  });
+    a = b;
+  }
   return within;
 }
 
-/** Least distance between two filled polygons; 0 where they touch, overlap or one lies in the other. */
+/**
+ * Least distance between two filled polygons, in their own unit; 0 where they touch, overlap or one lies in the
+ * other (as in the simple-features standard). NaN for an empty one.
+ */
 export function polygonDistance(a: readonly Point[], b: readonly Point[]): number {
   const [firstA, firstB] = [a[0], b[0]];
   if (!firstA || !firstB) return NaN;
   if (inside(firstA, b) || inside(firstB, a)) return 0;
   let least = Infinity;
-  a.forEach((p, i) => {
-    const q = a[(i + 1) % a.length] as Point;
-    b.forEach((r, j) => {
-      const s = b[(j + 1) % b.length] as Point;
-      const distance = segmentDistance(p, q, r, s);
-      if (distance < least) least = distance;
-    });
-  });
-  return least;
+  let p = a[a.length - 1] as Point;
+  for (const q of a) {
+    let r = b[b.length - 1] as Point;
+    for (const s of b) {
+      // Boxes further apart than the least so far cannot hold a nearer pair.
+      const gapX = Math.max(
+        Math.min(p[0], q[0]) - Math.max(r[0], s[0]),
+        Math.min(r[0], s[0]) - Math.max(p[0], q[0]),
+      );
+      const gapY = Math.max(
+        Math.min(p[1], q[1]) - Math.max(r[1], s[1]),
+        Math.min(r[1], s[1]) - Math.max(p[1], q[1]),
+      );
+      const gap2 = (gapX > 0 ? gapX * gapX : 0) + (gapY > 0 ? gapY * gapY : 0);
+      if (!(gap2 > least)) {
+        if (gap2 === 0 && cross(p, q, r, s)) return 0;
+        const found = Math.min(
+          pointToSegment2(p[0], p[1], r[0], r[1], s[0], s[1]),
+          pointToSegment2(q[0], q[1], r[0], r[1], s[0], s[1]),
+          pointToSegment2(r[0], r[1], p[0], p[1], q[0], q[1]),
+          pointToSegment2(s[0], s[1], p[0], p[1], q[0], q[1]),
+        );
+        if (!(found >= least)) least = found;
+      }
+      r = s;
+    }
+    p = q;
+  }
+  return Math.sqrt(least);
 }

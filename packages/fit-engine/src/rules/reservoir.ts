@@ -69,7 +69,7 @@ function byDrawing(
   });
   const judged = results.filter((one): one is Swept => one.result.distanceMm !== null);
   const [first, ...others] = judged;
-  if (!first) return incomplete(word?.value === 'fits', results[0]?.result.incomplete ?? null, said);
+  if (!first) return incomplete(word?.value === 'fits', results[0]?.result, said);
   const rank = ({ result }: Swept): number => result.distanceMm + (result.incomplete === null ? 0 : -1e6);
   const { positionDeg, result } = others.reduce((best, one) => (rank(one) > rank(best) ? one : best), first);
   const figures = [said, ...drawnFigures(result)];
@@ -84,7 +84,7 @@ function byDrawing(
       ? only(answer('reservoir', 'unknown', 'reservoir-drawing-incomplete', { figures, ask: [askMaker] }))
       : only(answer('reservoir', 'fail', 'reservoir-touches', { figures }));
   }
-  if (result.incomplete !== null) return incomplete(word?.value === 'fits', result.incomplete, said);
+  if (result.incomplete !== null) return incomplete(word?.value === 'fits', result, said);
   const measured = ridersRoom(trial.frame.reservoirRoom, reservoir, trial.shock.source);
   if (measured?.state === 'too-small') {
     return only(
@@ -106,14 +106,21 @@ const drawnFigures = ({ distanceMm, part, atShockTravelMm }: Swept['result']): F
   figure('computed.tightestAt', atShockTravelMm, 'mm', computed),
 ];
 
-/** Drawings with a gap decide nothing by themselves; the maker's word may, the rider's still measure may not see motion. */
+/**
+ * Drawings with a gap decide nothing by themselves. A part that moves in a way nobody has drawn may meet the
+ * reservoir, whatever is said; of a part that stands still, or a position not drawn, the maker's word may speak.
+ */
 function incomplete(
   makerSaysFits: boolean,
-  missing: string | null,
+  result: SweepResult | undefined,
   said: Figure | null,
 ): ReservoirAnswer | null {
-  if (makerSaysFits || missing === null) return null;
-  const figures = [said, figure('room.missing', missing, null, computed)];
+  if (!result || result.incomplete === null) return null;
+  const figures = [said, figure('room.missing', result.incomplete, null, computed)];
+  if (result.movementNotDrawn) {
+    return only(answer('reservoir', 'unknown', 'reservoir-movement-not-drawn', { figures, ask: [askMaker] }));
+  }
+  if (makerSaysFits) return null;
   return only(answer('reservoir', 'unknown', 'reservoir-drawing-incomplete', { figures, ask: [askMaker] }));
 }
 

@@ -39,8 +39,17 @@ export interface Outcome {
   positionDeg: number | null;
 }
 
-/** All checks of one trial, in the order in which they are shown; the sweep only while nothing cheap has failed. */
-export function runTrial(trial: Trial): Outcome {
+/** A trial with its cheap checks done, in the order in which they are shown; the reservoir comes between. */
+export interface Begun {
+  trial: Trial;
+  before: CheckAnswer[];
+  after: CheckAnswer[];
+  spring: SpringForRider | null;
+  /** The least that it can cost: as if the reservoir passed. */
+  cost: number[];
+}
+
+export function begin(trial: Trial): Begun {
   const [eye, stroke] = sizeChecks(trial);
   const rate = springRateCheck(trial);
   const pressure = pressureCheck(trial);
@@ -63,18 +72,24 @@ export function runTrial(trial: Trial): Outcome {
     noticesCheck(trial),
     readingConflictCheck(trial),
   ];
-  const open = trial.full || (worst(before) !== 'fail' && worst(after) !== 'fail');
+  const spring = trial.shock.spring.kind === 'coil' ? rate.spring : pressure.spring;
+  return { trial, before, after, spring, cost: costOf([...before, ...after]) };
+}
+
+/** The costly check, only while nothing cheap has failed or the whole is asked for. */
+export function finish({ trial, before, after, spring, cost }: Begun): Outcome {
+  const open = trial.full || cost[0] !== rankOf('fail');
   const room = open ? reservoirCheck(trial) : null;
   return {
     trial,
     answers: room ? [...before, room.answer, ...after] : [...before, ...after],
-    spring: trial.shock.spring.kind === 'coil' ? rate.spring : pressure.spring,
+    spring,
     positionDeg: room?.positionDeg ?? null,
   };
 }
 
-/** Fewer fails, then fewer unknowns, then less work, then fewer parts. */
-function cost({ answers }: Outcome): number[] {
+/** The worst answer, then how many fail, are not known, need work; then parts. */
+export function costOf(answers: readonly CheckAnswer[]): number[] {
   const counts = [0, 0, 0, 0];
   let parts = 0;
   for (const given of answers) {
@@ -84,12 +99,18 @@ function cost({ answers }: Outcome): number[] {
   return [rankOf(worst(answers)), counts[3] ?? 0, counts[2] ?? 0, counts[1] ?? 0, parts];
 }
 
-/** The better of two outcomes; on a tie the first entry by id, body to the frame, so that no order of input matters. */
-export function better(a: Outcome, b: Outcome): Outcome {
-  const [costA, costB] = [cost(a), cost(b)];
-  for (let i = 0; i < costA.length; i += 1) {
-    if (costA[i] !== costB[i]) return (costB[i] ?? 0) < (costA[i] ?? 0) ? b : a;
+interface Costed {
+  cost: readonly number[];
+  trial: Trial;
+}
+
+/** Order of preference; on a tie the first entry by id, body to the frame, so that no order of input matters. */
+export function compare(a: Costed, b: Costed): number {
+  for (let i = 0; i < a.cost.length; i += 1) {
+    const difference = (a.cost[i] ?? 0) - (b.cost[i] ?? 0);
+    if (difference !== 0) return difference;
   }
-  if (a.trial.entry.id !== b.trial.entry.id) return b.trial.entry.id < a.trial.entry.id ? b : a;
-  return a.trial.wayRound === 'body-to-frame' ? a : b;
+  if (a.trial.entry.id !== b.trial.entry.id) return a.trial.entry.id < b.trial.entry.id ? -1 : 1;
+  if (a.trial.wayRound === b.trial.wayRound) return 0;
+  return a.trial.wayRound === 'body-to-frame' ? -1 : 1;
 }
