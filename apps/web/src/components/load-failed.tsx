@@ -1,0 +1,29 @@
+import { LinkButton } from './link-button';
+import { Page } from './page';
+import { PageHeading } from './page-heading';
+import { isApiProblem } from '../lib/api-problem';
+
+/** A page whose data could not be had: what is the matter, and the next step. */
+export function LoadFailed({ error, what }: { error: Error; what: string }) {
+  const missing = isApiProblem(error) && error.status === 404;
+  return (
+    <Page width="text">
+      <PageHeading
+        lead={
+          missing
+            ? `There are no such things here, or this browser has not opened ${what} before.`
+            : isApiProblem(error)
+              ? (error.detail ?? error.title)
+              : 'Something went wrong on our side.'
+        }
+      >
+        {missing ? `We cannot show ${what}` : `Could not load ${what}`}
+      </PageHeading>
+      {what === 'this order' ? (
+        <LinkButton to="/find-order">Find my order</LinkButton>
+      ) : (
+        <LinkButton to="/">To the front page</LinkButton>
+      )}
+    </Page>
+  );
+}
