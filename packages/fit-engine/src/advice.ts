@@ -5,11 +5,10 @@ import { computed, figure, type Trial } from './rules/context.js';
 import { sizeOf } from './sizing/sizes.js';
 
 /** Reasons for and against that never touch the verdict; the weight orders them. Thresholds: common practice. */
-export function advise({ entry, shock }: Trial): Advice[] {
+export function advise(trial: Trial): Advice[] {
+  const { shock } = trial;
   const found: Advice[] = [];
-  const size = sizeOf(entry.sizeKey ?? shock.sizeKey);
-  const made = size ? makeCurve(entry.curve, entry.travelMm, size.strokeMm) : null;
-  const progression = made?.ok && made.curve.usableForAdvice ? made.curve.progressionPercent : null;
+  const progression = progressionOf(trial);
   if (progression !== null && shock.spring.kind === 'coil') {
     found.push({
       code: progressionCode(progression),
@@ -27,6 +26,17 @@ export function advise({ entry, shock }: Trial): Advice[] {
   }
   found.push({ code: 'advice-service-yours', figures: [], weight: 0 });
   return found.sort((a, b) => b.weight - a.weight);
+}
+
+/** Progression of the entry's own curve with the entry's own stroke; null where there is no curve to trust. */
+function progressionOf({ entry, shock, shared }: Trial): number | null {
+  const before = shared.progressions.get(entry);
+  if (before !== undefined) return before;
+  const size = sizeOf(entry.sizeKey ?? shock.sizeKey);
+  const made = size ? makeCurve(entry.curve, entry.travelMm, size.strokeMm) : null;
+  const found = made?.ok && made.curve.usableForAdvice ? made.curve.progressionPercent : null;
+  if (entry.sizeKey !== null) shared.progressions.set(entry, found);
+  return found;
 }
 
 function progressionCode(percent: number): ReasonCode {

@@ -1,13 +1,12 @@
-import type { Judgement, Verdict } from './answers.js';
+import type { Judgement, PartNeed, Verdict, WorkNeed } from './answers.js';
 import { advise } from './advice.js';
 import type { FitQuestion, ShockFacts } from './facts.js';
 import { rankOf, worst, type Shared } from './rules/context.js';
 import { entryApplies } from './rules/entry-applies.js';
-import { begin, compare, costOf, finish, type Begun, type Outcome } from './rules/run-trial.js';
+import { beginAll, compare, costOf, finish, type Begun, type Outcome } from './rules/run-trial.js';
 import { presentSize } from './sizing/present-size.js';
 
 const verdicts: readonly Verdict[] = ['bolts-straight-in', 'fits-with-work', 'needs-an-answer', 'wont-fit'];
-const ways = ['body-to-frame', 'body-to-link'] as const;
 
 /** The best outcome; a trial that could not beat the best so far even with room for the reservoir is not swept. */
 function bestOf(trials: readonly Begun[]): Outcome | null {
@@ -25,20 +24,23 @@ function judgeWith(question: FitQuestion, shared: Shared, full: boolean): Judgem
   const { entries } = question.frame;
   // An entry for another year, size or chip position must neither save a shock nor condemn it.
   const speaking = entries.filter((entry) => shared.applies.get(entry)?.state !== 'no');
-  const trials = (speaking.length > 0 ? speaking : entries).flatMap((entry) =>
-    ways.map((wayRound) => begin({ ...question, shared, entry, wayRound, full })),
-  );
+  const trials = beginAll({ ...question, shared, full }, speaking.length > 0 ? speaking : entries);
   const best = bestOf(trials);
   if (!best) throw new RangeError('a frame needs at least one entry');
   const { answers, trial, spring, positionDeg } = best;
-  const work = answers.flatMap((given) => given.work);
+  const parts: PartNeed[] = [];
+  const work: WorkNeed[] = [];
+  for (const given of answers) {
+    parts.push(...given.parts);
+    work.push(...given.work);
+  }
   return {
     verdict: verdicts[rankOf(worst(answers))] ?? 'wont-fit',
     answers,
     entryId: trial.entry.id,
     wayRound: trial.wayRound,
     reservoirPositionDeg: positionDeg,
-    parts: answers.flatMap((given) => given.parts),
+    parts,
     work,
     spring,
     advice: advise(trial),
@@ -52,6 +54,7 @@ function sharedBy({ frame, present, rider }: Pick<FitQuestion, 'frame' | 'presen
     size: presentSize(frame, present),
     applies: new Map(frame.entries.map((entry) => [entry, entryApplies(frame, rider, entry)])),
     rides: new Map(),
+    progressions: new Map(),
     coils: new Map(),
   };
 }

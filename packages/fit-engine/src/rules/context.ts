@@ -26,6 +26,8 @@ export interface Shared {
   applies: Map<SheetEntry, Applies>;
   /** Load, window and leverage by entry and stroke. */
   rides: Map<SheetEntry, Map<string, RideResult>>;
+  /** Progression of the leverage by entry, %; null where it is not known. */
+  progressions: Map<SheetEntry, number | null>;
   /** Springs already chosen, by what they depend on. */
   coils: Map<Ride, Map<string, SpringAnswer>>;
 }
@@ -62,22 +64,43 @@ interface Extras {
   ask?: readonly AskNeed[];
 }
 
+const none: readonly never[] = Object.freeze([]);
+const plain = new Map<string, CheckAnswer>();
+
+/** An answer without figures or needs is the same for every shock: one object serves them all. */
+function plainAnswer(check: CheckId, kind: AnswerKind, code: ReasonCode): CheckAnswer {
+  const key = `${check} ${code}`;
+  const before = plain.get(key);
+  if (before) return before;
+  const made: CheckAnswer = Object.freeze({
+    check,
+    answer: kind,
+    code,
+    figures: none,
+    remark: false,
+    parts: none,
+    work: none,
+    ask: none,
+  });
+  plain.set(key, made);
+  return made;
+}
+
 /** Builds an answer; figures that are null are left out. */
-export const answer = (
-  check: CheckId,
-  kind: AnswerKind,
-  code: ReasonCode,
-  { figures = [], remark = false, parts = [], work = [], ask = [] }: Extras = {},
-): CheckAnswer => ({
-  check,
-  answer: kind,
-  code,
-  figures: figures.filter((figure) => figure !== null),
-  remark,
-  parts,
-  work,
-  ask,
-});
+export function answer(check: CheckId, kind: AnswerKind, code: ReasonCode, extras?: Extras): CheckAnswer {
+  if (!extras) return plainAnswer(check, kind, code);
+  const { figures = none, remark = false, parts = none, work = none, ask = none } = extras;
+  return {
+    check,
+    answer: kind,
+    code,
+    figures: figures.includes(null) ? figures.filter((one) => one !== null) : (figures as readonly Figure[]),
+    remark,
+    parts,
+    work,
+    ask,
+  };
+}
 
 export const figure = (
   key: string,

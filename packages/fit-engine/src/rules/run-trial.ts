@@ -1,5 +1,6 @@
-import type { CheckAnswer, CheckId, SpringForRider } from '../answers.js';
-import { rankOf, worst, type Trial } from './context.js';
+import type { AnswerKind, CheckAnswer, CheckId, SpringForRider } from '../answers.js';
+import type { SheetEntry } from '../facts.js';
+import { rankOf, type Trial } from './context.js';
 import { diameterCheck } from './diameter.js';
 import { hardwareCheck } from './hardware.js';
 import { mountsCheck } from './mounts.js';
@@ -49,31 +50,35 @@ export interface Begun {
   cost: number[];
 }
 
-export function begin(trial: Trial): Begun {
-  const [eye, stroke] = sizeChecks(trial);
-  const rate = springRateCheck(trial);
-  const pressure = pressureCheck(trial);
-  const before = [
-    eye,
-    stroke,
-    mountsCheck(trial),
-    hardwareCheck(trial),
-    springTypeCheck(trial),
-    coilOnYokeCheck(trial),
-    rate.answer,
-    pressure.answer,
-    riderWeightCheck(trial),
-  ];
-  const after = [
-    diameterCheck(trial),
-    remoteCheck(trial),
-    positionCheck(trial),
-    eBikeCheck(trial),
-    noticesCheck(trial),
-    readingConflictCheck(trial),
-  ];
-  const spring = trial.shock.spring.kind === 'coil' ? rate.spring : pressure.spring;
-  return { trial, before, after, spring, cost: costOf([...before, ...after]) };
+const ways = ['body-to-frame', 'body-to-link'] as const;
+
+/**
+ * The cheap checks of a shock against some entries, both ways round. What depends neither on the entry nor on the way
+ * is answered once, what depends on the entry alone once for both ways: a catalogue of shocks is judged in one go.
+ */
+export function beginAll(base: Omit<Trial, 'entry' | 'wayRound'>, entries: readonly SheetEntry[]): Begun[] {
+  const [first] = entries;
+  if (!first) return [];
+  const any: Trial = { ...base, entry: first, wayRound: ways[0] };
+  const springType = springTypeCheck(any);
+  const weight = riderWeightCheck(any);
+  const diameter = diameterCheck(any);
+  const remote = remoteCheck(any);
+  const others = [eBikeCheck(any), noticesCheck(any), readingConflictCheck(any)];
+  return entries.flatMap((entry) => {
+    const one: Trial = { ...base, entry, wayRound: ways[0] };
+    const [eye, stroke] = sizeChecks(one);
+    const yoke = coilOnYokeCheck(one);
+    const [rate, pressure] = [springRateCheck(one), pressureCheck(one)];
+    const spring = base.shock.spring.kind === 'coil' ? rate.spring : pressure.spring;
+    return ways.map((wayRound): Begun => {
+      const trial: Trial = { ...base, entry, wayRound };
+      const [mounts, hardware] = [mountsCheck(trial), hardwareCheck(trial)];
+      const before = [eye, stroke, mounts, hardware, springType, yoke, rate.answer, pressure.answer, weight];
+      const after = [diameter, remote, positionCheck(trial), ...others];
+      return { trial, before, after, spring, cost: costOf(before, after) };
+    });
+  });
 }
 
 /** The costly check, only while nothing cheap has failed or the whole is asked for. */
@@ -89,14 +94,18 @@ export function finish({ trial, before, after, spring, cost }: Begun): Outcome {
 }
 
 /** The worst answer, then how many fail, are not known, need work; then parts. */
-export function costOf(answers: readonly CheckAnswer[]): number[] {
-  const counts = [0, 0, 0, 0];
-  let parts = 0;
-  for (const given of answers) {
-    counts[rankOf(given.answer)] = (counts[rankOf(given.answer)] ?? 0) + 1;
-    parts += given.parts.length;
+export function costOf(...lists: readonly (readonly CheckAnswer[])[]): number[] {
+  let [fail, unknown, work, parts] = [0, 0, 0, 0];
+  for (const answers of lists) {
+    for (const given of answers) {
+      parts += given.parts.length;
+      if (given.answer === 'fail') fail += 1;
+      else if (given.answer === 'unknown') unknown += 1;
+      else if (given.answer === 'work') work += 1;
+    }
   }
-  return [rankOf(worst(answers)), counts[3] ?? 0, counts[2] ?? 0, counts[1] ?? 0, parts];
+  const worst: AnswerKind = fail > 0 ? 'fail' : unknown > 0 ? 'unknown' : work > 0 ? 'work' : 'pass';
+  return [rankOf(worst), fail, unknown, work, parts];
 }
 
 interface Costed {
