@@ -10,6 +10,8 @@ export function routeObjects(): RouteObject[] {
     {
       element: <Shell />,
       errorElement: <ErrorPage />,
+      // The first page is fetched before the first render (see main.tsx), so that there is nothing to show meanwhile.
+      hydrateFallbackElement: <></>,
       children: [
         {
           errorElement: <ErrorPage />,

@@ -3,5 +3,6 @@ import { cleanup } from '@testing-library/react';
 import { afterEach } from 'vitest';
 import { installBrowserGaps } from './browser-gaps';
 
-installBrowserGaps();
+// Files that ask for the node environment have no browser to mend.
+if (typeof window !== 'undefined') installBrowserGaps();
 afterEach(cleanup);

@@ -41,11 +41,10 @@ const Choice = chakra('label', {
     minHeight: 'target',
     color: 'slate',
     cursor: 'pointer',
-    borderRadius: 'control',
-    borderBottomWidth: '2px',
+    borderBlockWidth: '2px',
     borderColor: 'transparent',
     _hover: { color: 'ink' },
-    '&:has(:checked)': { color: 'ink', borderColor: 'bracken' },
+    '&:has(:checked)': { color: 'ink', borderBottomColor: 'bracken' },
     '&:has(:focus-visible)': { outline: '3px solid', outlineColor: 'tarn' },
   },
 });

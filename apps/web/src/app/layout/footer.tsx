@@ -12,14 +12,29 @@ const Item = chakra(Link, {
   },
 });
 
+/** The fells in one line, on which the foot of the page rests. */
+const Ridge = () => (
+  <chakra.svg viewBox="0 0 1200 56" width="full" height="56px" preserveAspectRatio="none" aria-hidden="true">
+    <path
+      d="M0 55 C90 55 150 47 214 38 C262 31 292 12 330 9 C356 7 372 23 408 27 C470 34 520 36 590 46 C690 58 740 50 812 40 C872 32 900 20 948 21 C990 22 1020 38 1080 43 C1130 47 1160 44 1200 42"
+      fill="none"
+      stroke="var(--lf-colors-rule)"
+      strokeWidth="1.2"
+      vectorEffect="non-scaling-stroke"
+    />
+  </chakra.svg>
+);
+
 export function Footer() {
   return (
-    <chakra.footer borderTopWidth="1px" borderColor="hair" marginTop="auto">
+    <chakra.footer marginTop="auto">
+      <Ridge />
       <chakra.div
         maxWidth="page"
         marginInline="auto"
         paddingInline={{ base: '4', sm: '6', lg: '10' }}
-        paddingBlock="6"
+        paddingTop="2"
+        paddingBottom="6"
         display="flex"
         flexWrap="wrap"
         columnGap="6"

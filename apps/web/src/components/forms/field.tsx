@@ -1,5 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
+import { VisuallyHidden } from '../visually-hidden';
 
 /** What a control inside a field must carry, so that label, hint and fault are read out with it. */
 export interface ControlProps {
@@ -34,9 +35,9 @@ export function Field({ id, label, hint, error, optional, children }: FieldProps
     >
       <chakra.label htmlFor={id} display="block" fontWeight="bold">
         {label}
+        {optional ? ' ' : null}
         {optional ? (
           <chakra.span color="slate" fontWeight="normal">
-            {' '}
             (optional)
           </chakra.span>
         ) : null}
@@ -62,7 +63,6 @@ export const FieldHint = ({ id, children }: { id: string; children: ReactNode })
 
 export const FieldError = ({ id, children }: { id: string; children: ReactNode }) => (
   <chakra.p id={id} color="brick" fontWeight="bold">
-    <chakra.span srOnly>Error: </chakra.span>
-    {children}
+    <VisuallyHidden>Error:</VisuallyHidden> {children}
   </chakra.p>
 );

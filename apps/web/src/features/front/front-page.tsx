@@ -1,13 +1,18 @@
 import { Page } from '../../components/page';
-import { PageHeading } from '../../components/page-heading';
-import { LinkButton } from '../../components/link-button';
+import { Hero } from './hero';
+import { HowItGoes } from './how-it-goes';
+import { Partners } from './partners';
+import { TrustFacts } from './trust-facts';
+import { VerdictKey } from './verdict-key';
+
 export function FrontPage() {
   return (
     <Page>
-      <PageHeading lead="x">Find the rear shock that fits your bike</PageHeading>
-      <LinkButton to="/measure-up" size="large">
-        Start your measure-up
-      </LinkButton>
+      <Hero />
+      <TrustFacts />
+      <HowItGoes />
+      <VerdictKey />
+      <Partners />
     </Page>
   );
 }

@@ -1,0 +1,74 @@
+import { chakra } from '@chakra-ui/react';
+import { useQuery } from '@tanstack/react-query';
+import { useMemo } from 'react';
+import { useParams, useSearchParams } from 'react-router-dom';
+import { LoadFailed } from '../../components/load-failed';
+import { Notice } from '../../components/notice';
+import { Page } from '../../components/page';
+import { PageHeading } from '../../components/page-heading';
+import { Skeleton } from '../../components/skeleton';
+import { TextLink } from '../../components/text-link';
+import { usePageTitle } from '../../lib/page-title';
+import { matchesQueryOptions } from './api';
+import { MatchCards, MatchTable, sheetOf } from './match-rows';
+import { Sentence } from './sentence';
+
+/** The fitting sheet. */
+export function MatchesPage() {
+  const { id = '' } = useParams();
+  const [search, setSearch] = useSearchParams();
+  const text = search.toString();
+  const { data: view, error, isPlaceholderData } = useQuery(matchesQueryOptions(id, text ? `?${text}` : ''));
+  usePageTitle(view ? `Fitting sheet: ${view.title}` : 'Fitting sheet');
+  const sheet = useMemo(() => (view && view.rows.length > 0 ? sheetOf(view) : null), [view]);
+  if (error) return <LoadFailed error={error} what="this fitting sheet" />;
+  if (!view) {
+    return (
+      <Page>
+        <PageHeading>Fitting sheet</PageHeading>
+        <Skeleton lines={8} what="Judging every shock on sale for your bike" />
+      </Page>
+    );
+  }
+  return (
+    <Page maxWidth="90rem">
+      <PageHeading above="Fitting sheet" lead={view.sheetNote}>
+        {view.title}
+      </PageHeading>
+      <Sentence
+        view={view}
+        onChange={(change) =>
+          setSearch((before) => new URLSearchParams({ ...Object.fromEntries(before), ...change }), {
+            replace: true,
+          })
+        }
+      />
+      <chakra.p role="status" srOnly>
+        {view.rows.length} shocks shown{view.leftOut > 0 ? `, ${view.leftOut} left out` : ''}
+      </chakra.p>
+      <chakra.div aria-busy={isPlaceholderData} opacity={isPlaceholderData ? '0.6' : '1'}>
+        {sheet ? (
+          <>
+            <MatchTable view={view} sheet={sheet} />
+            <MatchCards view={view} sheet={sheet} />
+          </>
+        ) : (
+          <Notice tone="heather" title="Nothing on sale fits with this sentence">
+            <p>
+              {view.leftOut > 0
+                ? `${view.leftOut} shocks are left out by spring, reservoir or price. Change the sentence above, `
+                : ''}
+              show what won’t fit and why, or{' '}
+              <TextLink to={`/measure-up/${id}/check`}>look at your answers again</TextLink>.
+            </p>
+          </Notice>
+        )}
+      </chakra.div>
+      <chakra.p marginTop="8" color="slate" maxWidth="line">
+        {view.leftOut > 0 && sheet ? `${view.leftOut} more are left out by spring, reservoir or price. ` : ''}
+        Something wrong? <TextLink to={`/measure-up/${id}/check`}>Change your answers</TextLink>. Our figures
+        are starting points; the makers’ manuals come before anything here.
+      </chakra.p>
+    </Page>
+  );
+}
