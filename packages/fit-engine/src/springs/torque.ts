@@ -7,8 +7,8 @@ const stressAreaMm2: Readonly<Record<string, number>> = { M6: 20.1, M8: 36.6, M1
  * @param thread as the sheet prints it, "M8"; never the hardware's bolt diameter
  */
 export function torqueSlipRange(thread: string | null): { lowNm: number; highNm: number } | null {
-  const area = thread === null ? undefined : stressAreaMm2[thread];
-  if (area === undefined || thread === null) return null;
+  if (thread === null || !Object.hasOwn(stressAreaMm2, thread)) return null;
+  const area = stressAreaMm2[thread] ?? NaN;
   const highNm = (0.2 * 0.75 * 580 * area * Number(thread.slice(1))) / 1000;
   return { lowNm: 0.05 * highNm, highNm };
 }

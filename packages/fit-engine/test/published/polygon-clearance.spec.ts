@@ -47,13 +47,22 @@ describe('the same rotation as a swinging shock', () => {
     );
 
   it('vouches for no more than the closed form, and little less', () => {
-    const { distanceMm, atShockTravelMm } = swept([[0, 0], [50, 90]]); // prettier-ignore
+    const { distanceMm, atShockTravelMm } = swept([
+      [0, 0],
+      [50, 90],
+    ]);
     expect(distanceMm).toBeLessThanOrEqual(min_distance + abs);
     expect(distanceMm).toBeGreaterThan(min_distance - 0.25);
     expectNear(atShockTravelMm, 25, { abs: 1.5 });
   });
   it('takes the outline tolerance off', () => {
-    const { distanceMm } = swept([[0, 0], [50, 90]], 2); // prettier-ignore
+    const { distanceMm } = swept(
+      [
+        [0, 0],
+        [50, 90],
+      ],
+      2,
+    );
     expect(distanceMm).toBeLessThanOrEqual(min_distance - 2 + abs);
     expect(distanceMm).toBeGreaterThan(min_distance - 2 - 0.25);
   });
@@ -61,7 +70,12 @@ describe('the same rotation as a swinging shock', () => {
     // Ninety degrees within 0.4 mm of travel: steps of 0.5 mm alone would see 15 mm at both ends. Even the finest
     // step, 1/128 mm, hides half the way of the corner within it.
     const hiddenMm = ((Math.PI / 2) * Math.hypot(15, 15)) / 0.4 / 128 / 2;
-    const { distanceMm } = swept([[0, 0], [20.05, 0], [20.45, 90], [50, 90]]); // prettier-ignore
+    const { distanceMm } = swept([
+      [0, 0],
+      [20.05, 0],
+      [20.45, 90],
+      [50, 90],
+    ]);
     expect(distanceMm).toBeLessThanOrEqual(min_distance + abs);
     expect(distanceMm).toBeGreaterThan(min_distance - hiddenMm - 0.01);
   });

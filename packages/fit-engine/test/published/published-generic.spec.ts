@@ -30,7 +30,17 @@ describe('printed factors', () => {
 });
 
 describe('known roots, by the solver that finds the sag', () => {
-  const made = makeCurve({ by: 'shock-travel', points: [[0, 1], [2, 1]] }, null, 2); // prettier-ignore
+  const made = makeCurve(
+    {
+      by: 'shock-travel',
+      points: [
+        [0, 1],
+        [2, 1],
+      ],
+    },
+    null,
+    2,
+  );
   if (!made.ok) throw new Error(made.reason);
   const { curve } = made;
   // Where force(s) = load x ratio(s).

@@ -15,7 +15,13 @@ function curveOf(points: readonly (readonly [number, number])[], strokeMm: numbe
   return made.curve;
 }
 const { x, y } = travel.curves.progressive12;
-const linear = curveOf([[0, 3.0], [55, 2.4]], 55); // prettier-ignore
+const linear = curveOf(
+  [
+    [0, 3.0],
+    [55, 2.4],
+  ],
+  55,
+);
 const pchip12 = curveOf(
   x.map((s, i) => [s, y[i] ?? NaN] as const),
   55,
