@@ -1,9 +1,15 @@
 import type { AnswerKind, AskNeed, CheckAnswer } from '../answers.js';
+import type { Source } from '../facts.js';
 import { sizeOf } from '../sizing/sizes.js';
-import { answer, computed, figure, riderSaid, type Trial } from './context.js';
+import { answer, computed, figure, type Trial } from './context.js';
 import { entryApplies } from './entry-applies.js';
 import { positive } from './known.js';
 
+const fromYourShock: Source = {
+  kind: 'rider',
+  label: 'From your shock, not from the maker',
+  date: null,
+};
 const askMaker: AskNeed = { fact: 'frame.entries', whom: 'frame-maker' };
 const askRider = (fact: string): AskNeed => ({ fact, whom: 'rider' });
 
@@ -56,9 +62,8 @@ function describedSize(trial: Trial): [CheckAnswer, CheckAnswer] {
 function compare(trial: Trial, key: string, fromShock: boolean): [CheckAnswer, CheckAnswer] {
   const { entry, shock } = trial;
   const [wanted, offered] = [sizeOf(key), sizeOf(shock.sizeKey)];
-  const source = fromShock ? riderSaid : entry.source;
   const sizes = [
-    figure(fromShock ? 'present.size' : 'frame.size', key, null, source),
+    figure('frame.size', key, null, fromShock ? fromYourShock : entry.source),
     figure('shock.size', shock.sizeKey, null, shock.source),
   ];
   if (!wanted || !offered) {
