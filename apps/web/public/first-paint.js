@@ -1,3 +1,4 @@
+/* global document, location, matchMedia */
 // Runs before the first paint, as a file of its own because the policy of our pages allows no inline script.
 (function () {
   var root = document.documentElement;
