@@ -55,6 +55,8 @@ describe('rate and sag', () => {
 
   it('says where there is no sag', () => {
     expect(sagForRate(curve, 100, 100, 10)).toEqual({ state: 'topped-out' });
+    // Just carried at full extension: 29 N/mm x 10 mm = 100 N x 2.9.
+    expect(sagForRate(curve, 100, 29, 10)).toEqual({ state: 'topped-out' });
     expect(sagForRate(curve, 5000, 50, 1)).toEqual({ state: 'bottomed' });
     expect(sagForRate(curve, 700, 0, 1)).toEqual({ state: 'bottomed' });
   });
