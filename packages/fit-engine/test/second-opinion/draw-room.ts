@@ -30,6 +30,11 @@ export function drawRoom(q: FitQuestion, r: Random): FitQuestion {
   const parts: FrameOutline[] = [
     { name: 'tube', polygon: box(-60, top - 40, 320, top), toleranceMm: 0.5, poses: null, moves: false },
   ];
+  if (r.chance(0.3)) {
+    // A gusset behind the frame-side pivot: free only of a body at the link, and nearest when the shock is closed.
+    const gusset = box(-60, -10, r.pick([10, 30, 33.2]), 10);
+    parts.push({ name: 'gusset', polygon: gusset, toleranceMm: 0, poses: null, moves: false });
+  }
   if (r.chance(0.5)) {
     // A link that comes down on the shock as it closes, or one whose movement nobody has drawn.
     const drop = r.pick([0, 10, 25, 40]);

@@ -10,7 +10,7 @@ const both = (q: FitQuestion, path: string, value: unknown): FitQuestion =>
   set(set(q, `frame.entries.0.frameEnd.${path}`, value), `frame.entries.0.linkEnd.${path}`, value);
 const seen = (r: Random) => ({
   boreMm: r.pick([15, 15, 15.05, 12.7, null]),
-  widthMm: r.pick([30, 30.4, 31, 40]),
+  widthMm: r.pick([30, 30.4, 35, 35.4, 40]),
   boltMm: r.pick([8, 8.2, 10]),
   sound: r.pick([true, true, false, null]),
 });
@@ -41,16 +41,17 @@ const disturb: Record<CheckId, Draw> = {
   hardware: (q, r) => {
     const mount = {
       kind: 'hardware',
-      widthMm: r.pick([null, 30, 30.3, 35, 40]),
+      widthMm: r.pick([null, 30, 30.3, 35, 35, 40]),
       boltMm: r.pick([null, 8, 8, 8, 10]),
     };
-    const done = both(both(q, 'mount', mount), 'uncertaintyMm', r.pick([0, 0.25, 0.56]));
+    const u = r.pick([0, 0.25, 0.56]);
+    const one = r.pick(['frameEnd', 'linkEnd']);
+    const done = r.chance(0.5)
+      ? both(both(q, 'mount', mount), 'uncertaintyMm', u)
+      : set(set(q, `frame.entries.0.${one}.mount`, mount), `frame.entries.0.${one}.uncertaintyMm`, u);
     const eyes = set(set(done, 'shock.bodyEnd', ends[0]?.[1]), 'shock.shaftEnd', ends[0]?.[1]);
-    return set(
-      set(eyes, 'present.frameEndHardware', r.pick([null, seen(r)])),
-      'present.linkEndHardware',
-      r.pick([null, seen(r)]),
-    );
+    const old = set(eyes, 'present.frameEndHardware', r.pick([null, seen(r)]));
+    return set(old, 'present.linkEndHardware', r.pick([null, seen(r)]));
   },
   'spring-type': (q, r) =>
     set(
@@ -66,12 +67,21 @@ const disturb: Record<CheckId, Draw> = {
     );
     return set(yoked, 'frame.coilOnYoke', r.pick([null, fact('allowed'), fact('refused')]));
   },
-  'spring-rate': (q, r) => set(coil(q, r), 'rider.riderKg', r.pick([null, 30, 50, 90, 115])),
+  'spring-rate': (q, r) => {
+    const heavy = set(coil(q, r), 'rider.riderKg', r.pick([null, 30, 50, 90, 115]));
+    // Springs too short for the stroke with its preload, or just long enough.
+    const travelMm = r.pick([68, 55, 56, 56.5]);
+    return set(
+      heavy,
+      'sale.coils',
+      q.sale.coils.map((one) => ({ ...one, travelMm })),
+    );
+  },
   pressure: (q, r) => {
     const spring = {
       kind: 'air',
-      minGaugeKPa: r.pick([300, 900, 1300, null]),
-      maxGaugeKPa: r.pick([1000, 1400, 2000, null]),
+      minGaugeKPa: r.pick([300, 300, 900, 1300, null]),
+      maxGaugeKPa: r.chance(0.1) ? null : r.between(500, 2000),
     };
     const volumes = {
       areaMm2: r.pick([900, 1100]),

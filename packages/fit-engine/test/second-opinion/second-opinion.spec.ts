@@ -3,10 +3,13 @@ import { describe, expect, it } from 'vitest';
 import { checkIds, type Verdict } from '../../src/answers.js';
 import type { FitQuestion } from '../../src/facts.js';
 import { judge } from '../../src/judge.js';
+import { presentSize } from '../../src/sizing/present-size.js';
 import { randomQuestion } from '../judging/random-question.js';
 import { seeded, type Random } from '../judging/seeded.js';
 import { drawQuestion } from './draw.js';
+import { drawReadings } from './draw-readings.js';
 import { TooClose, type Kind } from './kinds.js';
+import { settled } from './sizes.js';
 import { kindsOf, secondOpinion } from './verdict.js';
 
 const verdicts: Record<Kind, Verdict> = {
@@ -74,5 +77,27 @@ describe('a second opinion that shares no code', () => {
     const { apart, left } = compareMany(1500, 7, randomQuestion);
     expect(apart).toEqual([]);
     expect(left).toBeLessThan(100);
+  }, 120_000);
+
+  it('agrees on the size of 3,000 sets of readings', () => {
+    const random = seeded(31);
+    let [left, settledOnes] = [0, 0];
+    const apart: unknown[] = [];
+    for (let i = 0; i < 3000; i += 1) {
+      const { frame, present } = drawReadings(random);
+      const theirs = settled(frame, present);
+      if (theirs === 'close') {
+        left += 1;
+        continue;
+      }
+      const ours = presentSize(frame, present);
+      if (theirs !== null) settledOnes += 1;
+      if (ours.sizeKey !== theirs || (ours.state === 'settled') !== (theirs !== null))
+        apart.push({ i, ours, theirs });
+    }
+    expect(apart).toEqual([]);
+    expect(left).toBeLessThan(150);
+    expect(settledOnes).toBeGreaterThan(500);
+    expect(settledOnes).toBeLessThan(2500);
   }, 120_000);
 });
