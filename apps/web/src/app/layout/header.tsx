@@ -10,6 +10,8 @@ const Home = chakra(Link, {
     gap: '2',
     minHeight: 'target',
     marginRight: 'auto',
+    // The mark's own margin, so that it stands on the left edge of the page.
+    marginLeft: '-2px',
     fontSize: 'xl',
     fontWeight: 'heavy',
     letterSpacing: '-0.02em',
@@ -22,7 +24,6 @@ const Item = chakra(NavLink, {
     display: 'inline-flex',
     alignItems: 'center',
     minHeight: 'target',
-    paddingInline: '1',
     color: 'slate',
     fontWeight: 'medium',
     whiteSpace: 'nowrap',

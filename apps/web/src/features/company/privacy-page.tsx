@@ -66,7 +66,8 @@ export function PrivacyPage() {
       <h2>In your browser</h2>
       <p>
         One cookie ties your browser to your measure-up, your order or your account. It is needed for the
-        pages to work and is sent to us only. Your choice of light or dark stays in the browser’s own storage.
+        pages to work, is sent to us only and ends after 60 days. Your choice of light or dark stays in the
+        browser’s own storage.
       </p>
       <h2>Your rights</h2>
       <p>
