@@ -26,9 +26,7 @@ export function DrawingFrame({ box, title, description, maxScale = 3.4, children
     height: 'auto',
   } as CSSProperties;
   return (
-    <div
-      style={{ containerType: 'inline-size', width: '100%', maxWidth: `${Math.round(width * maxScale)}px` }}
-    >
+    <div style={{ containerType: 'inline-size', width: `min(100%, ${Math.round(width * maxScale)}px)` }}>
       <svg
         viewBox={`${box.x1} ${box.y1} ${width} ${height}`}
         style={style}

@@ -19,6 +19,7 @@ const Row = chakra('label', {
       left: '-10px',
       top: '0',
     },
+    '& svg': { color: 'slate' },
     '& .tick': { opacity: '0' },
     '& input:checked ~ svg': { color: 'bracken' },
     '& input:checked ~ svg .tick': { opacity: '1' },
@@ -46,14 +47,7 @@ export function Checkbox({ id, label, hint, error, ...input }: CheckboxProps) {
           aria-describedby={error ? `${id}-error` : undefined}
           aria-invalid={error ? true : undefined}
         />
-        <chakra.svg
-          viewBox="0 0 24 24"
-          width="24px"
-          height="24px"
-          flexShrink="0"
-          color="slate"
-          aria-hidden="true"
-        >
+        <chakra.svg viewBox="0 0 24 24" width="24px" height="24px" flexShrink="0" aria-hidden="true">
           <rect
             x="1.5"
             y="1.5"

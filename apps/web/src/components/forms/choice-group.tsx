@@ -29,9 +29,7 @@ const Card = chakra('label', {
   base: {
     position: 'relative',
     display: 'flex',
-    flexWrap: 'wrap',
-    alignContent: 'flex-start',
-    columnGap: '3',
+    gap: '3',
     minHeight: 'target',
     paddingBlock: '3',
     paddingInline: '4',
@@ -75,7 +73,7 @@ const layouts = {
   cards: {
     display: 'grid',
     gap: '3',
-    gridTemplateColumns: 'repeat(auto-fill, minmax(min(100%, 12rem), 1fr))',
+    gridTemplateColumns: 'repeat(auto-fill, minmax(min(100%, 9rem), 1fr))',
   },
 } as const;
 
@@ -88,7 +86,7 @@ export function ChoiceGroup<V extends string>(props: ChoiceGroupProps<V>) {
       <chakra.legend fontWeight="bold">{legend}</chakra.legend>
       {hint ? <FieldHint id={`${id}-hint`}>{hint}</FieldHint> : null}
       {error ? <FieldError id={`${id}-error`}>{error}</FieldError> : null}
-      <chakra.div marginTop="2" css={{ ...layouts[layout], '& input:checked ~ svg .bolt': { opacity: 1 } }}>
+      <chakra.div marginTop="2" css={{ ...layouts[layout], '& input:checked ~ * .bolt': { opacity: 1 } }}>
         {choices.map((choice, index) => (
           <Card key={choice.value} flexDirection={choice.figure ? 'column' : 'row'}>
             <input
@@ -111,7 +109,7 @@ export function ChoiceGroup<V extends string>(props: ChoiceGroupProps<V>) {
 
 function ChoiceText<V extends string>({ choice }: { choice: Choice<V> }) {
   return (
-    <chakra.span display="contents">
+    <chakra.span display="flex" columnGap="3" width="full">
       <Ring />
       <chakra.span flex="1" minWidth="0">
         <chakra.span display="block" fontWeight="medium">
