@@ -10,9 +10,9 @@ const both = (q: FitQuestion, path: string, value: unknown): FitQuestion =>
   set(set(q, `frame.entries.0.frameEnd.${path}`, value), `frame.entries.0.linkEnd.${path}`, value);
 const seen = (r: Random) => ({
   boreMm: r.pick([15, 15, 15.05, 12.7, null]),
-  widthMm: r.pick([30, 30.4, 35, 35.4, 40]),
-  boltMm: r.pick([8, 8.2, 10]),
-  sound: r.pick([true, true, false, null]),
+  widthMm: r.pick([30, 35, 35, 35.4]),
+  boltMm: r.pick([8, 8, 8.2, 10]),
+  sound: r.pick([true, true, false, null, null]),
 });
 
 /** One disturbance per check: something that this check, and where it can be only this one, has to answer. */
