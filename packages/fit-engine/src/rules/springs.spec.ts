@@ -5,7 +5,6 @@ import {
   aFrame,
   anEntry,
   aPinEnd,
-  aPresentShock,
   aQuestion,
   aRider,
   aShock,
@@ -13,100 +12,11 @@ import {
   someParts,
 } from '../../test/judging/questions.js';
 import type { CheckId } from '../answers.js';
-import type { FitQuestion, RiderFacts, WeightLimit } from '../facts.js';
+import type { FitQuestion } from '../facts.js';
 import { judge } from '../judge.js';
 
 const codeOf = (check: CheckId, over: Partial<FitQuestion>): string | undefined =>
   judge(aQuestion(over), { full: true }).answers.find((given) => given.check === check)?.code;
-
-describe('rider weight', () => {
-  const limited = (limit: WeightLimit, rider: Partial<RiderFacts> = {}): string | undefined =>
-    codeOf('rider-weight', { shock: aShock({ riderLimit: fact(limit) }), rider: aRider(rider) });
-
-  it.each([
-    ['rider', 78, 77.9],
-    ['rider-and-kit', 83, 82.9],
-    ['with-bike', 97.5, 97.4],
-  ] as const)('counts on its basis, %s: %s passes, %s does not', (basis, at, below) => {
-    expect(limited({ kg: at, basis })).toBe('rider-weight-within');
-    expect(limited({ kg: below, basis })).toBe('rider-weight-over');
-  });
-
-  it('at the limit passes in fractions that binary cannot hold', () => {
-    expect(limited({ kg: 0.3 + 80, basis: 'rider-and-kit' }, { riderKg: 80.1, kitKg: 0.2 })).toBe(
-      'rider-weight-within',
-    );
-  });
-
-  it('without a basis is not known within the bike’s mass of the limit', () => {
-    expect(limited({ kg: 97.5, basis: null })).toBe('rider-weight-within');
-    expect(limited({ kg: 97.4, basis: null })).toBe('rider-weight-basis-not-printed');
-    expect(limited({ kg: 83, basis: null })).toBe('rider-weight-basis-not-printed');
-    expect(limited({ kg: 82.9, basis: null })).toBe('rider-weight-over');
-  });
-
-  it('not told is not known where a limit is printed, a remark where none is', () => {
-    expect(limited({ kg: 200, basis: 'rider' }, { riderKg: null })).toBe('rider-weight-not-known');
-    expect(codeOf('rider-weight', {})).toBe('rider-weight-no-limit');
-  });
-
-  it('holds the frame’s limit as well', () => {
-    const frame = aFrame({ riderLimit: fact({ kg: 70, basis: 'rider' }) });
-    expect(
-      codeOf('rider-weight', { frame, shock: aShock({ riderLimit: fact({ kg: 120, basis: 'rider' }) }) }),
-    ).toBe('rider-weight-over');
-  });
-});
-
-describe('remote', () => {
-  const lock = { action: 'pull-to-lock', line: 'cable', holdOpenPartId: null } as const;
-  const open = { action: 'pull-to-open', line: 'cable', holdOpenPartId: 'clip' } as const;
-  const ask = (
-    remote: FitQuestion['shock']['remote'],
-    rider: Partial<RiderFacts>,
-    more: Partial<FitQuestion> = {},
-  ) => codeOf('remote', { shock: aShock({ remote }), rider: aRider(rider), ...more });
-  const none = { frame: aFrame({ cableRouting: fact('none') }) };
-
-  it('wanted and not there does not do what was asked', () => {
-    expect(ask(null, { wantsRemote: true })).toBe('remote-wanted-has-none');
-    expect(ask(null, { wantsRemote: false })).toBe('remote-none');
-  });
-
-  it.each([null, lock, open])('not answered is asked for', (remote) => {
-    expect(ask(remote, { wantsRemote: null })).toBe('remote-wish-not-known');
-  });
-
-  it('without routing waits for the rider to accept external', () => {
-    expect(ask(lock, { wantsRemote: true }, none)).toBe('remote-no-routing');
-    const own = aPresentShock({ remoteAction: 'pull-to-lock', remoteLine: 'cable' });
-    const accepted = { wantsRemote: true, acceptsExternalRouting: true };
-    expect(ask(lock, accepted, { ...none, present: own })).toBe('remote-external-routing');
-    expect(ask(lock, { wantsRemote: true }, { frame: aFrame({ cableRouting: null }) })).toBe(
-      'remote-routing-not-known',
-    );
-  });
-
-  it('adds a lever where the rider’s own disagrees or is not known', () => {
-    for (const present of [
-      aPresentShock(),
-      aPresentShock({ remoteAction: 'pull-to-open', remoteLine: 'cable' }),
-    ]) {
-      expect(ask(lock, { wantsRemote: true }, { present })).toBe('remote-lever-added');
-    }
-    expect(ask(lock, { wantsRemote: true }, { sale: someParts({ remotes: [] }) })).toBe(
-      'remote-no-lever-on-sale',
-    );
-  });
-
-  it('not wanted stays open when pulled to lock, and needs a part when pulled to open', () => {
-    expect(ask(lock, { wantsRemote: false })).toBe('remote-stays-open');
-    expect(ask(open, { wantsRemote: false })).toBe('remote-stays-closed');
-    expect(ask(open, { wantsRemote: false }, { sale: someParts({ otherPartIds: ['clip'] }) })).toBe(
-      'remote-held-open',
-    );
-  });
-});
 
 describe('a coil', () => {
   const on = (yokes: readonly (boolean | null)[], word: 'allowed' | 'refused' | null) => {
@@ -234,33 +144,5 @@ describe('pressure', () => {
   it('without printed limits is not known', () => {
     expect(withLimits(null, 2400)).toBe('pressure-limits-not-printed');
     expect(withLimits(100, null)).toBe('pressure-limits-not-printed');
-  });
-});
-
-describe('e-bikes and notices', () => {
-  it.each([
-    [false, null, 'e-bike-not-one'],
-    [true, true, 'e-bike-approved'],
-    [true, false, 'e-bike-refused'],
-    [true, null, 'e-bike-no-word'],
-    [null, true, 'e-bike-approved'],
-    [null, false, 'e-bike-not-told'],
-    [null, null, 'e-bike-not-told'],
-  ] as const)('bike %s, shock %s: %s', (bike, word, code) => {
-    const frame = aFrame({ eBike: bike === null ? null : fact(bike) });
-    const shock = aShock({ eBikeApproved: word === null ? null : fact(word) });
-    expect(codeOf('e-bike', { frame, shock })).toBe(code);
-  });
-
-  it('a recall on either stops the sale and is the one that is named', () => {
-    const { source } = fact(0);
-    const remark = { id: 'a', title: 'Read the note', effect: 'remark', source } as const;
-    const recall = { id: 'b', title: 'Recall of the eye', effect: 'stop', source } as const;
-    const { verdict, answers } = judge(
-      aQuestion({ frame: aFrame({ notices: [remark] }), shock: aShock({ notices: [recall] }) }),
-    );
-    expect(verdict).toBe('wont-fit');
-    expect(answers.find(({ check }) => check === 'notices')?.figures[0]?.value).toBe('Recall of the eye');
-    expect(codeOf('notices', { frame: aFrame({ notices: [remark] }) })).toBe('notices-remark');
   });
 });
