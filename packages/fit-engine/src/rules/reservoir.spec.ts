@@ -52,7 +52,7 @@ describe('room for a reservoir', () => {
   });
 
   it('is refused by the maker whatever is drawn or measured', () => {
-    const over = {
+    const over: Partial<FrameFacts> = {
       reservoirStatement: fact('inline-only'),
       room: room(tube(-90)),
       reservoirRoom: measured(80),
