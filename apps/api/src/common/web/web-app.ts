@@ -18,10 +18,16 @@ const serverSide = /^\/(api|health|metrics|assets)(\/|$)/;
 class Pages {
   private readonly known = new Map<string, Page>();
 
-  constructor(private readonly root: string) {}
+  /** Without content of its own: the front page is written out in index.html, and is not what other addresses show. */
+  private readonly empty: string;
+
+  constructor(private readonly root: string) {
+    const bare = join(root, 'app.html');
+    this.empty = existsSync(bare) ? bare : join(root, 'index.html');
+  }
 
   at(path: string): Page {
-    const file = this.prerendered(path) ?? join(this.root, 'index.html');
+    const file = this.prerendered(path) ?? this.empty;
     let page = this.known.get(file);
     if (!page) {
       const html = readFileSync(file, 'utf8');
