@@ -1,6 +1,6 @@
 import { questionSchemas, type QuestionKey } from '@linkfell/contracts';
 import { useState } from 'react';
-import { useForm, type Resolver } from 'react-hook-form';
+import { useForm, useWatch, type Resolver } from 'react-hook-form';
 import type { FieldFault } from '../../components/forms/error-summary';
 import type { FieldSpec, Raw } from './specs/spec';
 
@@ -51,12 +51,13 @@ export function useQuestionForm(
     return { values: {}, errors };
   };
   const form = useForm<Raw>({
+    defaultValues: start,
     values: start,
     resolver,
     shouldFocusError: false,
     resetOptions: { keepDirtyValues: true },
   });
-  const raw = form.watch();
+  const raw = useWatch({ control: form.control }) as Raw;
   const faults: FieldFault[] = Object.entries(form.formState.errors).flatMap(([fieldId, error]) =>
     error?.message ? [{ fieldId, message: String(error.message) }] : [],
   );
