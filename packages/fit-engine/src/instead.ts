@@ -53,7 +53,10 @@ function changed(shock: ShockFacts, code: InsteadCode, sizeKey: string): ShockFa
   return code === 'instead-listed-size' ? { ...shock, sizeKey, spacedToKeys: [] } : null;
 }
 
-/** The changes that would let a refused shock in: those that are enough alone first. Empty for any other verdict. */
+/**
+ * The changes that would let a refused shock in, in the order of the checks, so that another size comes first: of
+ * all changes it alone can take more than one reason away. Empty for any other verdict.
+ */
 export function fitsInstead(question: FitQuestion, judgement: Judgement): Instead[] {
   if (judgement.verdict !== 'wont-fit') return [];
   const { frame, shock } = question;
@@ -65,14 +68,12 @@ export function fitsInstead(question: FitQuestion, judgement: Judgement): Instea
     const other = changed(shock, code, sizeKey);
     return other && judge({ ...question, shock: other }, { full: true }).verdict !== 'wont-fit';
   };
-  const found = [...new Set(codes)].flatMap((code): Instead[] => {
+  return [...new Set(codes)].flatMap((code): Instead[] => {
     if (code !== 'instead-listed-size') return [{ code, sizeKeys: [], enough: lets(code, shock.sizeKey) }];
     const good = listed.filter((key) => lets(code, key));
     if (listed.length === 0) return [];
     return [{ code, sizeKeys: good.length > 0 ? good : listed, enough: good.length > 0 }];
   });
-  const rank = (enough: boolean | null): number => (enough ? 0 : 1);
-  return found.sort((a, b) => rank(a.enough) - rank(b.enough));
 }
 
 export function tellInstead({ code, sizeKeys }: Instead): string {

@@ -35,7 +35,9 @@ export function nearest(
     Math.max(0, polygonDistance(placed(a, a.poseAt(s)), placed(b, b.poseAt(s))) - toleranceMm);
   const seen = bends.map((s) => ({ s, free: freeAt(s) }));
   let least = beat;
+  // The nearest that was seen says where; the least bound says how near at worst.
   let found: Nearest = { mm: Infinity, at: 0 };
+  let vouched = Infinity;
   const saw = (s: number, free: number): void => {
     least = Math.min(least, free);
     if (free < found.mm) found = { mm: free, at: s };
@@ -47,7 +49,7 @@ export function nearest(
     if (bound >= least || found.mm === 0) return;
     const near = bound >= least - givenAway(least) && s1 - s0 <= stepMm;
     if (near || s1 - s0 <= finestMm) {
-      if (bound < found.mm) found = { mm: bound, at: d0 <= d1 ? s0 : s1 };
+      vouched = Math.min(vouched, bound);
       return;
     }
     const mid = (s0 + s1) / 2;
@@ -60,5 +62,5 @@ export function nearest(
     const [p, q] = [seen[i - 1], seen[i]];
     if (p && q) look(p.s, p.free, q.s, q.free);
   }
-  return found;
+  return { mm: Math.min(found.mm, vouched), at: found.at };
 }
