@@ -16,7 +16,7 @@ export default defineConfig({
   forbidOnly: true,
   // Two cores, shared with the API, PostgreSQL and the stand-ins.
   workers: 1,
-  timeout: 60_000,
-  expect: { timeout: 10_000 },
+  timeout: 180_000,
+  expect: { timeout: 30_000 },
   use: { ...devices['Desktop Chrome'], launchOptions, locale: 'en-GB', trace: 'retain-on-failure' },
 });

@@ -20,7 +20,7 @@ const ownerOf = (organisation: string) => {
 
 for (const width of [360, 1280]) {
   test(`guest rider from the front page to fitted, at ${width} px`, async ({ page, stack, browser }) => {
-    test.setTimeout(120_000);
+    test.setTimeout(300_000);
     await page.setViewportSize({ width, height: 900 });
     const email = `wren-${width}@rider.example`;
     await measureUp(page);
@@ -99,7 +99,7 @@ for (const width of [360, 1280]) {
 }
 
 test('a declined card, another one, and the order is paid', async ({ page }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(300_000);
   await measureUp(page);
   await planFirst(page);
   await page.getByRole('button', { name: /^Pay £/ }).click();
@@ -116,7 +116,7 @@ test('a declined card, another one, and the order is paid', async ({ page }) => 
 test('cancelled on the payment page: the hold is let go by the rider, the plan is still there', async ({
   page,
 }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(300_000);
   await measureUp(page);
   await planFirst(page);
   await fillContact(page, 'cancelled@rider.example');

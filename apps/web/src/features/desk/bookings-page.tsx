@@ -30,7 +30,7 @@ export function BookingsPage() {
         if (bookings.length === 0) return null;
         return (
           <chakra.section key={title} marginBottom="8">
-            <chakra.h2 fontSize="xl" marginBottom="2">
+            <chakra.h2 fontSize="xl" fontWeight="heavy" marginBottom="2">
               {title}
             </chakra.h2>
             <chakra.ul listStyleType="none" borderTopWidth="2px" borderColor="ink">

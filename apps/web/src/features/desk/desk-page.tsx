@@ -43,7 +43,9 @@ export function DeskPage() {
           paddingTop="4"
           marginBottom="8"
         >
-          <chakra.h2 fontSize="xl">{organisation.name}</chakra.h2>
+          <chakra.h2 fontSize="xl" fontWeight="heavy">
+            {organisation.name}
+          </chakra.h2>
           <chakra.p color="slate" marginBottom="4">
             You are its {organisation.role}.
           </chakra.p>

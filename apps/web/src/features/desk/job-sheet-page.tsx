@@ -101,7 +101,7 @@ function Sheet({ sheet, orgId }: { sheet: JobSheetView; orgId: string }) {
         <>
           <RecordForm key={sheet.version} sheet={sheet} job={job} />
           <Section>
-            <chakra.h2 fontSize="xl" marginBottom="3">
+            <chakra.h2 fontSize="xl" fontWeight="heavy" marginBottom="3">
               Done?
             </chakra.h2>
             {sheet.missing.length > 0 ? (

@@ -29,7 +29,7 @@ export function ParcelsPage() {
         if (parcels.length === 0) return null;
         return (
           <chakra.section key={state} marginBottom="8">
-            <chakra.h2 fontSize="xl" marginBottom="2">
+            <chakra.h2 fontSize="xl" fontWeight="heavy" marginBottom="2">
               {titles[state]}
             </chakra.h2>
             {parcels.map((parcel) => (

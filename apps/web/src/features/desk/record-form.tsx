@@ -100,7 +100,7 @@ export function RecordForm({ sheet, job }: { sheet: JobSheetView; job: ReturnTyp
   );
   return (
     <chakra.section marginBottom="8" maxWidth="form" borderTopWidth="2px" borderColor="ink" paddingTop="5">
-      <chakra.h2 fontSize="xl" marginBottom="4">
+      <chakra.h2 fontSize="xl" fontWeight="heavy" marginBottom="4">
         Record of the fitting
       </chakra.h2>
       <ErrorSummary faults={faults} attempt={attempt} />

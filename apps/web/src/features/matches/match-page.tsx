@@ -107,7 +107,7 @@ export function MatchPage() {
           ...data.work.map(({ say }) => say),
         ]}
       />
-      <chakra.h2 fontSize="xl" marginBottom="3">
+      <chakra.h2 fontSize="xl" fontWeight="heavy" marginBottom="3">
         All checks
       </chakra.h2>
       <chakra.ul listStyleType="none" borderTopWidth="2px" borderColor="ink" marginBottom="8">
@@ -124,7 +124,7 @@ function Lines({ title, lines }: { title: string; lines: readonly string[] }) {
   if (lines.length === 0) return null;
   return (
     <chakra.section marginBottom="8" maxWidth="line">
-      <chakra.h2 fontSize="xl" marginBottom="2">
+      <chakra.h2 fontSize="xl" fontWeight="heavy" marginBottom="2">
         {title}
       </chakra.h2>
       <chakra.ul paddingLeft="5" listStyleType="disc">

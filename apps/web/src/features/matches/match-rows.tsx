@@ -25,7 +25,7 @@ const Head = chakra('th', {
     fontWeight: 'bold',
     lineHeight: 'heading',
     paddingBottom: '2',
-    paddingRight: '4',
+    paddingRight: '3',
     verticalAlign: 'bottom',
   },
 });
@@ -92,7 +92,7 @@ export function MatchTable({ view, sheet }: RowsProps) {
       <chakra.caption srOnly>Shocks on sale, judged for your bike</chakra.caption>
       <thead>
         <tr>
-          <Head width="15rem">All drawn to one scale{own ? '; grey: your shock' : ''}</Head>
+          <Head width="14rem">All drawn to one scale{own ? '; grey: your shock' : ''}</Head>
           <Head>Shock</Head>
           {headings.map((heading) => (
             <Head key={heading}>{heading}</Head>

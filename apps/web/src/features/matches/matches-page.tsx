@@ -31,7 +31,7 @@ export function MatchesPage() {
     );
   }
   return (
-    <Page maxWidth="90rem">
+    <Page>
       <PageHeading above="Fitting sheet" lead={view.sheetNote}>
         {view.title}
       </PageHeading>

@@ -13,7 +13,7 @@ const Word = chakra('select', {
     fontWeight: 'bold',
     fontSize: 'inherit',
     minHeight: 'target',
-    paddingInline: '1',
+    paddingInline: '0',
     borderBottomWidth: '2px',
     borderColor: 'bracken',
     cursor: 'pointer',

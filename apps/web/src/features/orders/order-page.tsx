@@ -27,7 +27,7 @@ import { Timeline } from './timeline';
 const Section = chakra('section', {
   base: { borderTopWidth: '2px', borderColor: 'ink', paddingTop: '5', marginBottom: '8' },
 });
-const Title = chakra('h2', { base: { fontSize: 'xl', marginBottom: '3' } });
+const Title = chakra('h2', { base: { fontSize: 'xl', fontWeight: 'heavy', marginBottom: '3' } });
 
 /** An order as a timeline, from paid to set up. */
 export function OrderPage() {
@@ -49,7 +49,7 @@ export function OrderPage() {
 function Order({ order }: { order: OrderView }) {
   const act = useOrderAction(order.reference);
   return (
-    <Page maxWidth="56rem">
+    <Page css={{ '& > *': { maxWidth: '56rem' } }}>
       <PageHeading above={`Order ${order.reference}`} lead={order.next}>
         {order.shockName}
       </PageHeading>

@@ -27,7 +27,7 @@ import { CheckoutForm } from './checkout-form';
 const Section = chakra('section', {
   base: { borderTopWidth: '2px', borderColor: 'ink', paddingTop: '5', marginBottom: '10' },
 });
-const Title = chakra('h2', { base: { fontSize: 'xl', marginBottom: '4' } });
+const Title = chakra('h2', { base: { fontSize: 'xl', fontWeight: 'heavy', marginBottom: '4' } });
 
 /** One shock chosen: parts, fitting, total, then pay. */
 export function PlanPage() {
@@ -52,7 +52,7 @@ function Plan({ plan }: { plan: PlanView }) {
   const name = `${shock.makerName} ${shock.modelName} ${shock.sizeKey}`;
   const fixable = plan.missing.filter(({ code }) => code !== 'choose-slot');
   return (
-    <Page maxWidth="56rem">
+    <Page css={{ '& > *': { maxWidth: '56rem' } }}>
       <chakra.p marginBottom="2">
         <TextLink
           to={`/measure-up/${plan.measureUpId}/matches`}

@@ -42,7 +42,7 @@ export function CheckAnswers({ view }: { view: MeasureUpView }) {
         if (questions.length === 0) return null;
         return (
           <chakra.section key={step} marginBottom="8" maxWidth="46rem">
-            <chakra.h2 fontSize="xl" marginBottom="2">
+            <chakra.h2 fontSize="xl" fontWeight="heavy" marginBottom="2">
               {stepNames[step]}
             </chakra.h2>
             <chakra.dl borderTopWidth="2px" borderColor="ink">
