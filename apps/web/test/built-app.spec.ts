@@ -1,6 +1,6 @@
 // @vitest-environment node
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { routeList } from '../src/app/route-list';
+import { budgetsKb, routeList } from '../src/app/route-list';
 import { buildApp, firstLoad, gzippedKb, pageModules, type BuiltApp } from './built-app';
 
 let app: BuiltApp;
@@ -9,18 +9,12 @@ beforeAll(async () => {
 }, 120_000);
 afterAll(() => app.remove());
 
-/** What a page may load before it can be used, KB of JavaScript after gzip. */
-function budgetKb(path: string): number {
-  if (['/', '/terms', '/privacy', '/returns', '/contact'].includes(path)) return 170;
-  return path.startsWith('/measure-up') ? 270 : 320;
-}
-
 describe('first-load JavaScript', () => {
   it('knows the module of every page of the registry', () => {
     expect([...pageModules().keys()].sort()).toEqual(routeList.map(({ path }) => path).sort());
   });
 
-  it.each(routeList.map(({ path }) => [path, budgetKb(path)] as const))(
+  it.each(routeList.map(({ path, budget }) => [path, budgetsKb[budget]] as const))(
     'of %s is at most %d KB',
     (path, budget) => {
       const files = firstLoad(app, pageModules().get(path) ?? '');

@@ -43,7 +43,7 @@ export async function buildApp(): Promise<BuiltApp> {
 /** The source module of every page, by its path, as the registry of routes imports them. */
 export function pageModules(): Map<string, string> {
   const registry = readFileSync(join(web, 'src/app/routes.tsx'), 'utf8');
-  const entries = registry.matchAll(/path: '([^']+)',[\s\S]*?import\('\.\.\/([^']+)'\)/g);
+  const entries = registry.matchAll(/'(\/[^']*)': \(\) =>\s*import\('\.\.\/([^']+)'\)/g);
   return new Map([...entries].map(([, path, module]) => [path ?? '', `src/${module}.tsx`]));
 }
 
