@@ -8,10 +8,12 @@ import { LostPivot } from './lost-pivot';
 export function NotFoundPage() {
   return (
     <Page width="text">
-      <LostPivot />
+      <chakra.div marginBottom="5">
+        <LostPivot />
+      </chakra.div>
       <PageHeading
         above="Page not found"
-        lead="There is nothing at this address. It may have moved, or a sign in it got lost."
+        lead="There is nothing at this address. It may have moved, or a letter of it got lost."
       >
         This end is not connected
       </PageHeading>

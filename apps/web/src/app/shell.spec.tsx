@@ -1,17 +1,22 @@
-import { act, screen, waitFor, within } from '@testing-library/react';
+import { act, cleanup, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
-import { beforeEach, describe, expect, it, vi } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { setMedia } from '../testing/browser-gaps';
 import { renderRoutes } from '../testing/render-page';
 import { ErrorPage } from './error-page';
 import { Shell } from './layout/shell';
 import { routeObjects } from './route-objects';
 
+const answerOfMe = vi.fn<() => unknown>();
 beforeEach(() => {
+  answerOfMe.mockReturnValue({ account: null });
+  vi.stubGlobal('fetch', () => Promise.resolve(Response.json(answerOfMe())));
   setMedia();
   localStorage.clear();
   document.documentElement.className = '';
 });
+
+afterEach(() => vi.unstubAllGlobals());
 
 const heading = (name: RegExp | string) => screen.findByRole('heading', { level: 1, name });
 
@@ -34,6 +39,30 @@ describe('the shell', () => {
     const arrived = await heading('Returns and refunds');
     await waitFor(() => expect(arrived).toHaveFocus());
     expect(document.title).toBe('Returns and refunds – Linkfell');
+  });
+
+  it('leads to the desk whoever is signed in, and all others to the sign-in', async () => {
+    renderRoutes(routeObjects(), '/contact');
+    const main = within(await screen.findByRole('navigation', { name: 'Main' }));
+    expect(main.getByRole('link', { name: 'Sign in' })).toHaveAttribute('href', '/sign-in');
+    await waitFor(() => expect(answerOfMe).toHaveBeenCalled());
+    expect(main.queryByRole('link', { name: 'Desk' })).not.toBeInTheDocument();
+    cleanup();
+    answerOfMe.mockReturnValue({ account: { id: 'a1' } });
+    renderRoutes(routeObjects(), '/contact');
+    expect(await screen.findByRole('link', { name: 'Desk' })).toHaveAttribute('href', '/desk');
+    expect(screen.queryByRole('link', { name: 'Sign in' })).not.toBeInTheDocument();
+  });
+
+  it('follows at once when a page learns of signing in and out', async () => {
+    const { queries } = renderRoutes(routeObjects(), '/contact');
+    await heading('Contact');
+    act(() => void queries.setQueryData(['me'], { account: { id: 'a1' } }));
+    expect(await screen.findByRole('link', { name: 'Desk' })).toBeInTheDocument();
+    act(() => queries.clear());
+    const company = within(screen.getByRole('navigation', { name: 'Company' }));
+    await userEvent.click(company.getByRole('link', { name: 'Returns' }));
+    expect(await screen.findByRole('link', { name: 'Sign in' })).toBeInTheDocument();
   });
 
   it('says what is wrong at an address where nothing is', async () => {

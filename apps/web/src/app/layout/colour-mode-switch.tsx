@@ -37,7 +37,7 @@ const Choice = chakra('label', {
   base: {
     display: 'grid',
     placeItems: 'center',
-    minWidth: { base: '2.25rem', md: '2.75rem' },
+    minWidth: 'target',
     minHeight: 'target',
     color: 'slate',
     cursor: 'pointer',

@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { Link, NavLink } from 'react-router-dom';
 import { Mark } from '../../components/mark';
 import { ColourModeSwitch } from './colour-mode-switch';
+import { useSignedIn } from './use-signed-in';
 
 const Home = chakra(Link, {
   base: {
@@ -37,6 +38,7 @@ const Item = chakra(NavLink, {
 
 /** On a telephone two rows: the name and the colours, then the three ways in. */
 export function Header() {
+  const signedIn = useSignedIn();
   return (
     <chakra.header borderBottomWidth="1px" borderColor="hair" bg="chalk">
       <chakra.div
@@ -63,7 +65,14 @@ export function Header() {
         >
           <Item to="/measure-up">Measure-up</Item>
           <Item to="/find-order">Find my order</Item>
-          <Item to="/sign-in">Sign in</Item>
+          {/* As wide as either word, so that the rest of the header stays where it is. */}
+          <Item
+            to={signedIn ? '/desk' : '/sign-in'}
+            minWidth="3.5rem"
+            justifyContent={{ base: 'flex-end', md: 'flex-start' }}
+          >
+            {signedIn ? 'Desk' : 'Sign in'}
+          </Item>
         </chakra.nav>
         <ColourModeSwitch />
       </chakra.div>
