@@ -3,7 +3,7 @@ import { chakra } from '@chakra-ui/react';
 import { useState, type ComponentProps } from 'react';
 import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
-import { isApiProblem } from '../../lib/api-problem';
+import { applyProblem } from '../../lib/apply-problem';
 import { Button } from '../button';
 import { ErrorSummary } from './error-summary';
 import { Field } from './field';
@@ -48,13 +48,8 @@ export function SimpleForm<S extends z.ZodType<unknown, Values>>(props: SimpleFo
       await send(values as z.output<S>);
       onFaults?.(false);
     } catch (error) {
-      const said = describe?.(error);
-      const faults = !said && isApiProblem(error) ? error.errors : [];
-      for (const { pointer, detail } of faults) setError(pointer.slice(1), { message: detail });
-      if (faults.length === 0) {
-        const words = isApiProblem(error) ? (error.detail ?? error.title) : 'That did not work; try again.';
-        setError(fields[0]?.name ?? 'root', { message: said ?? words });
-      }
+      const names = fields.map(({ name }) => name);
+      applyProblem(error, setError, { fields: names, otherwise: names[0] ?? 'root', describe });
       failed();
     }
   };
