@@ -3,7 +3,7 @@ import { defineConfig } from 'vite';
 import { preloadFont } from './scripts/preload-font.ts';
 import { prerenderPages } from './scripts/prerender-pages.ts';
 
-const api = { target: process.env.API_URL ?? 'http://127.0.0.1:4320', changeOrigin: false };
+const api = { target: process.env.API_URL ?? 'http://127.0.0.1:4310', changeOrigin: false };
 
 export default defineConfig(({ mode }) => ({
   plugins: [react(), preloadFont(), prerenderPages()],

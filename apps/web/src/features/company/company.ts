@@ -3,7 +3,7 @@ export const company = {
   name: 'Linkfell Ltd',
   street: '1 Slate Wharf',
   town: 'Skelhow',
-  district: 'Hallin Fells',
+  district: 'Quernfell',
   postcode: 'QF1 2LF',
   email: 'help@linkfell.example',
   privacyEmail: 'privacy@linkfell.example',

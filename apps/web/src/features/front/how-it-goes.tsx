@@ -7,8 +7,8 @@ const steps = [
     text: 'One question at a time, with a drawing of what to measure and where. Every answer is kept; “I don’t know” is always allowed.',
   },
   {
-    title: 'Compare on the fitting sheet',
-    text: 'Every candidate is drawn at the scale of your own shock, its checks beside it as figures, its price all-in.',
+    title: 'Compare to scale',
+    text: 'On the fitting sheet every candidate is drawn at the scale of your own shock, its checks beside it as figures, its price all-in.',
   },
   {
     title: 'Plan and pay once',
