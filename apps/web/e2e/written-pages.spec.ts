@@ -92,6 +92,39 @@ test('the choice of colours outlives a reload and wins over the system', async (
   await expect(page.locator('html')).toHaveClass('dark');
 });
 
+test('in forced colours the drawing and what is chosen use the reader’s own', async ({ page }) => {
+  await page.emulateMedia({ forcedColors: 'active', reducedMotion: 'reduce' });
+  for (const colorScheme of ['light', 'dark'] as const) {
+    await page.emulateMedia({ colorScheme });
+    await page.goto(url);
+    await arrived(page);
+    const { drawn, own, chosen, others } = await page.evaluate(() => {
+      const own = ['CanvasText', 'Canvas', 'LinkText'].map((name) => {
+        // A new element each time: one that changes its colour would still be on its way to it.
+        const probe = document.createElement('p');
+        probe.style.color = name;
+        document.body.append(probe);
+        return getComputedStyle(probe).color;
+      });
+      const line = (label: Element) => getComputedStyle(label).borderBottomColor;
+      const labels = [...document.querySelectorAll('header label')];
+      return {
+        own,
+        drawn: [...document.querySelectorAll('main svg[role=img] path, header svg path')].flatMap((path) => {
+          const { stroke, fill } = getComputedStyle(path);
+          return [stroke, fill].filter((paint) => paint.startsWith('rgb'));
+        }),
+        chosen: labels.filter((label) => label.querySelector(':checked')).map(line),
+        others: labels.filter((label) => !label.querySelector(':checked')).map(line),
+      };
+    });
+    expect(drawn.length).toBeGreaterThan(10);
+    expect(drawn.filter((paint) => !own.includes(paint))).toEqual([]);
+    expect(others).toEqual([own[1], own[1]]);
+    expect(chosen).not.toEqual([own[1]]);
+  }
+});
+
 test('by keyboard: skip the header, pause the drawing, follow a link to its heading', async ({ page }) => {
   await page.goto(url);
   await arrived(page);

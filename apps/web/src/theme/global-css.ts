@@ -1,12 +1,16 @@
 import { defineGlobalStyles } from '@chakra-ui/react';
 import { palette } from './palette';
 
-/** In forced colours the reader's own palette wins, in the drawings too, which browsers leave alone. */
+/**
+ * In forced colours the reader's own palette wins, in the drawings too, which browsers leave alone. Important,
+ * because the layer of the tokens stands above the one of the global styles.
+ */
 const forced: Record<`--lf-colors-${string}`, string> = Object.fromEntries(
   Object.keys(palette).map((name) => {
     const ground = /^(chalk|paper|wash|onBracken|.*Tint)$/.test(name);
     const link = /^(tarn|bracken)(Deep)?$/.test(name);
-    return [`--lf-colors-${hyphened(name)}`, ground ? 'Canvas' : link ? 'LinkText' : 'CanvasText'];
+    const system = ground ? 'Canvas' : link ? 'LinkText' : 'CanvasText';
+    return [`--lf-colors-${hyphened(name)}`, `${system} !important`];
   }),
 );
 

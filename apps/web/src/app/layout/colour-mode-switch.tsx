@@ -45,6 +45,10 @@ const Choice = chakra('label', {
     borderColor: 'transparent',
     _hover: { color: 'ink' },
     '&:has(:checked)': { color: 'ink', borderBottomColor: 'bracken' },
+    '@media (forced-colors: active)': {
+      borderColor: 'Canvas',
+      '&:has(:checked)': { borderBottomColor: 'Highlight' },
+    },
     '&:has(:focus-visible)': { outline: '3px solid', outlineColor: 'tarn' },
   },
 });

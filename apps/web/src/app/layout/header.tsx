@@ -33,6 +33,11 @@ const Item = chakra(NavLink, {
     borderColor: 'transparent',
     _hover: { color: 'ink' },
     '&[aria-current=page]': { color: 'ink', borderBottomColor: 'bracken' },
+    // Forced colours draw transparent borders too: only the one that means something may be seen.
+    '@media (forced-colors: active)': {
+      borderColor: 'Canvas',
+      '&[aria-current=page]': { borderBottomColor: 'Highlight' },
+    },
   },
 });
 

@@ -14,7 +14,8 @@ const Cell = chakra('label', {
     fontWeight: 'bold',
     cursor: 'pointer',
     _last: { borderRightRadius: '4px' },
-    '&:has(:checked)': { bg: 'ink', color: 'paper', textDecoration: 'none' },
+    // Our tokens are the reader's own colours in that mode; its adjustment would take the ground away.
+    '&:has(:checked)': { bg: 'ink', color: 'paper', forcedColorAdjust: 'none' },
     '&:has(:focus-visible)': { outline: '3px solid', outlineColor: 'tarn', outlineOffset: '2px' },
   },
 });
