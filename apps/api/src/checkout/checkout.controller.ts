@@ -5,6 +5,7 @@ import type { Request } from 'express';
 
 import { PlanGrant } from '../common/access/access.js';
 import { GrantsService } from '../common/access/grants.service.js';
+import { OwnershipService } from '../common/access/ownership.service.js';
 import { Idempotent } from '../common/idempotency/idempotent.js';
 import { Answers } from '../common/validation/answers.js';
 import { zod } from '../common/validation/zod.pipe.js';
@@ -15,6 +16,7 @@ export class CheckoutController {
   constructor(
     private readonly service: CheckoutService,
     private readonly grants: GrantsService,
+    private readonly ownership: OwnershipService,
   ) {}
 
   @Post()
@@ -26,7 +28,9 @@ export class CheckoutController {
     @Body(zod(checkoutBody)) body: CheckoutBody,
     @Req() request: Request,
   ): Promise<CheckoutView> {
-    const { orderId, ...view } = await this.service.checkout(id, body);
+    const { orderId, ...view } = await this.service.checkout(id, body, (reference) =>
+      this.ownership.holdsOrder(request, reference),
+    );
     this.grants.addOrder(request, orderId);
     return view;
   }

@@ -17,19 +17,23 @@ import { IfMatch, setVersion } from '../common/http/etag.js';
 import { Answers } from '../common/validation/answers.js';
 import { zod } from '../common/validation/zod.pipe.js';
 import { BookingsService } from './bookings.service.js';
+import { JobSheets } from './job-sheets.service.js';
 
 type Empty = z.infer<typeof emptyBody>;
 const id = zod(uuid);
 
 @Controller('organisations/:orgId/bookings')
 export class BookingsController {
-  constructor(private readonly bookings: BookingsService) {}
+  constructor(
+    private readonly bookings: BookingsService,
+    private readonly sheets: JobSheets,
+  ) {}
 
   @Get()
   @Member('workshop')
   @Answers(bookingList)
   list(@Param('orgId') orgId: string): Promise<BookingList> {
-    return this.bookings.list(orgId);
+    return this.sheets.list(orgId);
   }
 
   @Get(':bookingId')
@@ -40,11 +44,11 @@ export class BookingsController {
     @Param('bookingId', id) bookingId: string,
     @Res({ passthrough: true }) response: Response,
   ): Promise<JobSheetView> {
-    return withVersion(response, await this.bookings.jobSheet(orgId, bookingId));
+    return withVersion(response, await this.sheets.jobSheet(orgId, bookingId));
   }
 
   @Post(':bookingId/accept')
-  @Member('workshop', ['owner', 'staff', 'mechanic'])
+  @Member('workshop', ['owner', 'staff'])
   @Answers(jobSheetView)
   async accept(
     @Param('bookingId', id) bookingId: string,
@@ -52,14 +56,11 @@ export class BookingsController {
     @Body(zod(emptyBody)) _: Empty,
     @Res({ passthrough: true }) response: Response,
   ): Promise<JobSheetView> {
-    return withVersion(
-      response,
-      await this.bookings.accept(member.organisationId, bookingId, member.accountId),
-    );
+    return withVersion(response, await this.bookings.accept({ ...member, bookingId }));
   }
 
   @Post(':bookingId/decline')
-  @Member('workshop', ['owner', 'staff', 'mechanic'])
+  @Member('workshop', ['owner', 'staff'])
   @Answers(jobSheetView)
   async decline(
     @Param('bookingId', id) bookingId: string,
@@ -67,8 +68,7 @@ export class BookingsController {
     @Body(zod(declineBody)) { reason }: DeclineBody,
     @Res({ passthrough: true }) response: Response,
   ): Promise<JobSheetView> {
-    const { organisationId, accountId } = member;
-    return withVersion(response, await this.bookings.decline(organisationId, bookingId, accountId, reason));
+    return withVersion(response, await this.bookings.decline({ ...member, bookingId }, reason));
   }
 
   @Put(':bookingId/record')
@@ -81,11 +81,7 @@ export class BookingsController {
     @Body(zod(fittingRecordBody)) body: FittingRecordBody,
     @Res({ passthrough: true }) response: Response,
   ): Promise<JobSheetView> {
-    const { organisationId, accountId } = member;
-    return withVersion(
-      response,
-      await this.bookings.record(organisationId, bookingId, accountId, version, body),
-    );
+    return withVersion(response, await this.bookings.record({ ...member, bookingId }, version, body));
   }
 
   @Post(':bookingId/fitted')
@@ -97,7 +93,7 @@ export class BookingsController {
     @Body(zod(emptyBody)) _: Empty,
     @Res({ passthrough: true }) response: Response,
   ): Promise<JobSheetView> {
-    return withVersion(response, await this.bookings.fitted(member.organisationId, bookingId));
+    return withVersion(response, await this.bookings.fitted({ ...member, bookingId }));
   }
 }
 

@@ -1,25 +1,31 @@
-import { randomUUID } from 'node:crypto';
-
 import { Injectable } from '@nestjs/common';
-import { In, type EntityManager } from 'typeorm';
+import { In, Not, type EntityManager } from 'typeorm';
 
 import { Clock } from '../common/clock.js';
-import { sqlState } from '../database/in-transaction.js';
-import { fromRangeText, toRangeText } from '../database/time-range.js';
+import { fromRangeText } from '../database/time-range.js';
+import { bookStand, type WantedSlot } from '../fitting-bookings/book-stand.js';
 import { Booking, type BookingState } from '../fitting-bookings/booking.entity.js';
 import { OutboxService } from '../outbox/outbox.service.js';
 import { Payment } from '../payments/payment.entity.js';
 import { Refund } from '../payments/refund.entity.js';
-import { answerDeadline } from '../plans/planning/calendar.js';
-import { moveStock } from '../stock/move-stock.js';
+import { Plan } from '../plans/plan.entity.js';
+import { answerDeadline, dayOf } from '../plans/planning/calendar.js';
 import { WorkshopsService } from '../workshops/workshops.service.js';
-import { OrderLine } from './order-line.entity.js';
-import { OrderMails } from './order-mails.service.js';
-import { Order, type OrderState } from './order.entity.js';
+import { dispatchDays } from './dispatch-days.js';
+import { freeStock, reserveStock } from './order-stock.js';
+import { liveStates, Order, type OrderState } from './order.entity.js';
 import { Parcel, type ParcelAddress, type ParcelState } from './parcel.entity.js';
-import { bookingTransitions, orderTransitions, parcelTransitions, step } from './transitions.js';
+import { RiderMails } from './rider-mails.service.js';
+import { TradeMails } from './trade-mails.service.js';
+import {
+  bookingTransitions,
+  orderTransitions,
+  parcelTransitions,
+  paymentTransitions,
+  step,
+} from './transitions.js';
 
-export type ReleaseReason = 'cancelled' | 'expired' | 'payment-unavailable';
+export type ReleaseReason = 'cancelled' | 'expired' | 'replaced' | 'payment-unavailable';
 
 /** Every change of an order, its parcels and its booking; each call belongs in one transaction that holds the order's lock. */
 @Injectable()
@@ -27,7 +33,8 @@ export class OrderLifecycle {
   constructor(
     private readonly clock: Clock,
     private readonly outbox: OutboxService,
-    private readonly mails: OrderMails,
+    private readonly riderMails: RiderMails,
+    private readonly tradeMails: TradeMails,
     private readonly workshops: WorkshopsService,
   ) {}
 
@@ -40,50 +47,44 @@ export class OrderLifecycle {
     return manager.findOneBy(Booking, { orderId, state: In(['held', 'requested', 'accepted']) });
   }
 
-  /** Lets stock and slot go; nothing was paid. */
+  /** Lets stock and slot go; nothing was paid. A reason that was written down before the session ended by call counts. */
   async release(manager: EntityManager, order: Order, reason: ReleaseReason): Promise<void> {
-    await this.setOrder(manager, order, 'released', { releaseReason: reason, endedAt: this.clock.now() });
-    await this.freeStock(manager, order);
+    const releaseReason = order.releaseReason ?? reason;
+    await this.setOrder(manager, order, 'released', { releaseReason, endedAt: this.clock.now() });
+    await freeStock(manager, order);
     await this.setParcels(manager, order, 'cancelled');
     const booking = await this.liveBooking(manager, order.id);
     if (booking) await this.setBooking(manager, booking, 'released');
-    await manager.update(Payment, { orderId: order.id }, { state: 'expired' });
-    if (reason === 'expired') {
-      await this.mails.released(manager, order, 'the time to pay ran out, so stock and date were let go.');
-    }
+    const payment = await manager.findOneByOrFail(Payment, { orderId: order.id });
+    payment.state = step(paymentTransitions, payment.state, 'expired');
+    await manager.save(payment);
+    if (releaseReason === 'expired') await this.riderMails.released(manager, order);
   }
 
-  /** The payment has arrived. @returns false when the hold had ended and stock or slot are gone: the money goes back */
-  async paid(manager: EntityManager, order: Order): Promise<boolean> {
-    if (order.state === 'released' && !(await this.holdAgain(manager, order))) {
-      await this.setOrder(manager, order, 'refunding', { paidAt: this.clock.now() });
-      const why =
-        'your payment arrived after the hold had ended, and stock or date had gone to somebody else.';
-      await this.refund(manager, order, order.totalMinor, why);
-      return false;
-    }
+  /** The payment has arrived. After the hold has ended, the order lives again only if all of it is still to be had. */
+  async paid(manager: EntityManager, order: Order): Promise<void> {
     const now = this.clock.now();
+    const late = order.state === 'released';
+    const why = late ? await this.whyNotAgain(manager, order) : null;
+    if (why !== null) {
+      await this.setOrder(manager, order, 'refunding', { paidAt: now });
+      await this.refund(manager, order, order.totalMinor, why);
+      return;
+    }
     await this.setOrder(manager, order, 'paid', { paidAt: now, releaseReason: null, endedAt: null });
     const booking = await this.liveBooking(manager, order.id);
-    await this.setParcels(manager, order, booking ? 'waiting' : 'to-send');
-    if (booking) await this.request(manager, order, booking);
-    await this.mails.paid(
-      manager,
-      order,
-      booking
-        ? 'The workshop now has one working day to accept the fitting; parts are sent when it has.'
-        : 'The shops now send your parts.',
-    );
-    await this.mails.shops(manager, order, booking !== null);
-    return true;
+    // Dates were promised from the moment of ordering; paid in time, they hold.
+    if (booking) await this.request(manager, order, booking, late ? now : order.createdAt);
+    await this.releaseParcels(manager, order, booking);
+    await this.riderMails.paid(manager, order, booking);
+    await this.tradeMails.shopOrders(manager, order);
   }
 
   /** Asks a workshop, and puts the end of its time to answer on the clock. */
-  async request(manager: EntityManager, order: Order, booking: Booking): Promise<void> {
-    const now = this.clock.now();
-    const [workshop] = await this.workshops.days(now, manager, booking.workshopId);
+  async request(manager: EntityManager, order: Order, booking: Booking, askedAt: Date): Promise<void> {
+    const [workshop] = await this.workshops.days(askedAt, manager, booking.workshopId);
     const answerBy =
-      (workshop && answerDeadline(now, workshop.calendar)) ?? new Date(now.getTime() + 86_400_000);
+      (workshop && answerDeadline(askedAt, workshop.calendar)) ?? new Date(askedAt.getTime() + 86_400_000);
     await this.setBooking(manager, booking, 'requested', { answerBy });
     await this.outbox.add(
       manager,
@@ -91,38 +92,27 @@ export class OrderLifecycle {
       { bookingId: booking.id },
       { dedupeKey: `booking-unanswered:${booking.id}`, runAt: answerBy },
     );
-    await this.mails.request(manager, order, booking);
+    await this.tradeMails.request(manager, order, booking);
   }
 
-  /** Puts a booking on the first of the stands that is still free. @returns null when none is */
-  async book(
+  /** Holds a stand for the order. @returns null when none of the slot's stands is free any more */
+  book(manager: EntityManager, order: Order, slot: WantedSlot): Promise<Booking | null> {
+    return bookStand(manager, order.id, slot, this.clock.now());
+  }
+
+  /** To the workshop once it has accepted, to the rider at once; with the last day on which each has to leave. */
+  async releaseParcels(
     manager: EntityManager,
     order: Order,
-    slot: { workshopId: string; standIds: readonly string[]; start: Date; end: Date },
-    state: BookingState = 'held',
-  ): Promise<Booking | null> {
-    for (const standId of slot.standIds) {
-      await manager.query('SAVEPOINT stand');
-      try {
-        const booking = await manager.save(
-          manager.create(Booking, {
-            orderId: order.id,
-            workshopId: slot.workshopId,
-            standId,
-            during: toRangeText(slot),
-            state,
-            calendarUid: `${randomUUID()}@linkfell`,
-            createdAt: this.clock.now(),
-          }),
-        );
-        await manager.query('RELEASE SAVEPOINT stand');
-        return booking;
-      } catch (error) {
-        if (sqlState(error) !== '23P01') throw error;
-        await manager.query('ROLLBACK TO SAVEPOINT stand');
-      }
-    }
-    return null;
+    booking: Booking | null,
+    address?: ParcelAddress,
+  ): Promise<void> {
+    const releasedAt = booking?.answerBy ?? this.clock.now();
+    const days = await dispatchDays(manager, order.id, releasedAt);
+    await this.setParcels(manager, order, booking ? 'waiting' : 'to-send', {
+      ...(address && { address }),
+      dispatchBy: new Map(days.map(({ parcelId, dispatchBy }) => [parcelId, dispatchBy])),
+    });
   }
 
   /** Gives money back on the way it came: the call to the provider follows from the outbox. */
@@ -130,15 +120,17 @@ export class OrderLifecycle {
     if (amountMinor <= 0) return;
     const payment = await manager.findOneByOrFail(Payment, { orderId: order.id });
     await manager.increment(Payment, { id: payment.id }, 'refundedMinor', amountMinor);
-    const refund = await manager.save(Refund, {
-      paymentId: payment.id,
-      amountMinor,
-      reason: why,
-      state: 'pending' as const,
-      createdAt: this.clock.now(),
-    });
+    const refund = await manager.save(
+      manager.create(Refund, {
+        paymentId: payment.id,
+        amountMinor,
+        reason: why,
+        state: 'pending',
+        createdAt: this.clock.now(),
+      }),
+    );
     await this.outbox.add(manager, 'refund', { refundId: refund.id }, { dedupeKey: `refund:${refund.id}` });
-    await this.mails.refunded(manager, order, amountMinor, why, refund.id);
+    await this.riderMails.refunded(manager, order, refund);
   }
 
   async setOrder(
@@ -183,58 +175,38 @@ export class OrderLifecycle {
     }
   }
 
-  async freeStock(manager: EntityManager, order: Order): Promise<void> {
-    for (const line of await this.stockLines(manager, order)) {
-      const listingId = line.listingId as string;
-      await moveStock(manager, {
-        listingId,
-        kind: 'release',
-        quantity: 0,
-        reserved: -line.quantity,
-        orderId: order.id,
-      });
-    }
-  }
-
-  /** Item lines in the order of their listings, so that two orders never wait for each other in a circle. */
-  async stockLines(manager: EntityManager, order: Order): Promise<OrderLine[]> {
-    return manager.find(OrderLine, {
-      where: { orderId: order.id, kind: 'item' },
-      order: { listingId: 'ASC' },
-    });
-  }
-
-  private async holdAgain(manager: EntityManager, order: Order): Promise<boolean> {
-    await manager.query('SAVEPOINT again');
-    for (const line of await this.stockLines(manager, order)) {
-      const listingId = line.listingId as string;
-      const taken = await moveStock(manager, {
-        listingId,
-        kind: 'reserve',
-        quantity: 0,
-        reserved: line.quantity,
-        orderId: order.id,
-      });
-      if (!taken) {
-        await manager.query('ROLLBACK TO SAVEPOINT again');
-        return false;
+  /** Why an order that was let go cannot live again, as the rider reads it; null when stock and slot are held anew. */
+  private async whyNotAgain(manager: EntityManager, order: Order): Promise<string | null> {
+    if (order.planId) {
+      // Locked as checkout locks it: a new order of the same plan is either seen here or waits for this one.
+      await manager.findOne(Plan, { where: { id: order.planId }, lock: { mode: 'pessimistic_write' } });
+      const other = { planId: order.planId, id: Not(order.id), state: In(liveStates) };
+      if (await manager.existsBy(Order, other)) {
+        return 'this payment arrived after its order had made way for a newer one of the same plan.';
       }
     }
-    const [old] = await manager.find(Booking, {
+    await manager.query('SAVEPOINT again');
+    if ((await reserveStock(manager, order)) && (await this.bookAgain(manager, order))) return null;
+    await manager.query('ROLLBACK TO SAVEPOINT again');
+    return 'your payment arrived after the hold had ended, and stock or date had gone to somebody else.';
+  }
+
+  /** The same time on any stand of the same workshop, if parts can still be there by then. @returns whether the order has what it needs of a workshop */
+  private async bookAgain(manager: EntityManager, order: Order): Promise<boolean> {
+    const old = await manager.findOne(Booking, {
       where: { orderId: order.id },
       order: { createdAt: 'DESC' },
-      take: 1,
     });
     if (!old) return true;
-    const { start, end } = fromRangeText(old.during);
-    const again = await this.book(manager, order, {
-      workshopId: old.workshopId,
-      standIds: [old.standId],
-      start,
-      end,
-    });
-    if (again) return true;
-    await manager.query('ROLLBACK TO SAVEPOINT again');
-    return false;
+    const now = this.clock.now();
+    const span = fromRangeText(old.during);
+    const [workshop] = await this.workshops.days(now, manager, old.workshopId);
+    const answerBy = workshop && answerDeadline(now, workshop.calendar);
+    if (!workshop || !answerBy) return false;
+    const day = dayOf(span.start, workshop.calendar.timeZone).toString();
+    const days = await dispatchDays(manager, order.id, answerBy);
+    if (answerBy >= span.start || days.some(({ arrivesOn }) => arrivesOn >= day)) return false;
+    const standIds = [...new Set([old.standId, ...workshop.stands])];
+    return (await this.book(manager, order, { workshopId: old.workshopId, standIds, ...span })) !== null;
   }
 }

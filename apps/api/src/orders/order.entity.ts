@@ -20,6 +20,9 @@ import { Parcel } from './parcel.entity.js';
 
 export type OrderState = 'held' | 'paid' | 'completed' | 'released' | 'refunding' | 'refunded';
 
+/** States in which an order stands for its plan: no second one is made beside it. */
+export const liveStates: OrderState[] = ['held', 'paid', 'completed', 'refunding'];
+
 @Entity('orders')
 @Unique('orders_reference_once', ['reference'])
 @Check('orders_state_known', `state IN ('held','paid','completed','released','refunding','refunded')`)

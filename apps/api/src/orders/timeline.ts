@@ -1,146 +1,112 @@
 import type { OrderView } from '@linkfell/contracts';
 
 import type { Booking } from '../fitting-bookings/booking.entity.js';
+import type { Refund } from '../payments/refund.entity.js';
+import { poundsText } from './money-text.js';
 import type { Order } from './order.entity.js';
 import type { Parcel } from './parcel.entity.js';
 
+/** A fitting that was asked for, with what its row does not tell. */
+export interface PlacedBooking {
+  booking: Pick<Booking, 'state' | 'answerBy' | 'decidedAt' | 'declineReason'>;
+  workshopName: string;
+  start: Date;
+}
+
 export interface OrderParts {
-  order: Order;
-  parcels: Parcel[];
-  booking: Booking | null;
-  /** Start of the fitting. */
-  fittingAt: Date | null;
-  workshopName: string | null;
+  order: Pick<Order, 'state' | 'fit' | 'createdAt' | 'paidAt' | 'holdExpiresAt' | 'endedAt'>;
+  parcels: Pick<Parcel, 'state' | 'sentAt' | 'dispatchBy' | 'address' | 'shop'>[];
+  /** All that were ever asked for, latest first. */
+  bookings: PlacedBooking[];
+  refunds: Pick<Refund, 'state' | 'amountMinor' | 'reason' | 'doneAt'>[];
   fittedAt: Date | null;
 }
 
 type Event = OrderView['timeline'][number];
-const iso = (at: Date | null): string | null => at?.toISOString() ?? null;
+const done = (at: Date | null, title: string, detail: string | null = null): Event => ({
+  at: at?.toISOString() ?? null,
+  done: true,
+  title,
+  detail,
+});
+const coming = (at: Date | null, title: string, detail: string | null = null): Event => ({
+  ...done(at, title, detail),
+  done: false,
+});
 
-/** What has happened and what comes, oldest first; every promise with its date. */
-export function timelineOf({
-  order,
-  parcels,
-  booking,
-  fittingAt,
-  workshopName,
-  fittedAt,
-}: OrderParts): Event[] {
-  const events: Event[] = [{ at: iso(order.createdAt), done: true, title: 'Ordered', detail: null }];
-  const add = (at: Date | null, done: boolean, title: string, detail: string | null = null): void =>
-    void events.push({ at: iso(at), done, title, detail });
+/** What has happened, oldest first, then what comes, soonest first; what has no date yet stands last. */
+export function timelineOf(parts: OrderParts): Event[] {
+  const { order } = parts;
+  const events = [done(order.createdAt, 'Ordered')];
   if (order.state === 'released') {
-    add(order.endedAt, true, 'Let go', 'Nothing was paid; stock and date were released.');
-    return events;
+    events.push(done(order.endedAt, 'Let go', 'Nothing was paid; stock and date were released.'));
+  } else if (order.paidAt) {
+    events.push(done(order.paidAt, 'Paid'), ...parts.refunds.map(refundEvent));
+    events.push(...parts.bookings.flatMap(answerEvents));
+    const goingBack = order.state === 'refunding' || order.state === 'refunded';
+    events.push(...parts.parcels.flatMap((parcel) => parcelEvents(parcel, goingBack)));
+    events.push(...fittingEvents(parts, goingBack));
+  } else {
+    events.push(coming(order.holdExpiresAt, 'Pay before the hold ends'));
   }
-  add(
-    order.paidAt ?? order.holdExpiresAt,
-    order.paidAt !== null,
-    order.paidAt ? 'Paid' : 'Pay before the hold ends',
-  );
-  if (order.state === 'refunding' || order.state === 'refunded') {
-    add(
-      order.endedAt,
-      order.state === 'refunded',
-      'Refunded',
-      'Your money goes back to the card you paid with.',
-    );
-    return events;
-  }
-  if (booking && booking.state !== 'held') {
-    const answered = booking.state === 'accepted' || booking.state === 'fitted';
-    const title = answered
-      ? `${workshopName} accepted the fitting`
-      : bookingWords(booking.state, workshopName ?? 'The workshop');
-    add(
-      answered || booking.decidedAt ? booking.decidedAt : booking.answerBy,
-      answered || booking.state !== 'requested',
-      title,
-      booking.declineReason,
-    );
-  }
-  for (const parcel of parcels) {
-    if (parcel.state === 'cancelled') continue;
-    const sent = parcel.state === 'sent';
-    add(
-      sent ? parcel.sentAt : new Date(`${parcel.dispatchBy}T12:00:00Z`),
-      sent,
-      sent ? `${parcel.shop.name} sent a parcel` : `${parcel.shop.name} sends a parcel`,
-      `To ${parcel.address.name}`,
-    );
-  }
-  if (fittingAt && booking && booking.state !== 'declined' && booking.state !== 'lapsed') {
-    add(
-      fittedAt ?? fittingAt,
-      fittedAt !== null,
-      fittedAt ? 'Fitted and set up' : `Fitting at ${workshopName}`,
-    );
-  }
-  return events;
+  const last = '9';
+  return events.sort((a, b) => Number(b.done) - Number(a.done) || (a.at ?? last).localeCompare(b.at ?? last));
 }
 
-function bookingWords(state: Booking['state'], workshop: string): string {
+function refundEvent({ state, amountMinor, reason, doneAt }: OrderParts['refunds'][number]): Event {
+  return state === 'done'
+    ? done(doneAt, `${poundsText(amountMinor)} went back to your card`, reason)
+    : coming(null, `${poundsText(amountMinor)} goes back to your card`, reason);
+}
+
+function answerEvents({ booking, workshopName }: PlacedBooking): Event[] {
+  const { state, answerBy, decidedAt, declineReason } = booking;
   switch (state) {
     case 'requested':
-      return `${workshop} answers by`;
-    case 'declined':
-      return `${workshop} declined`;
-    case 'lapsed':
-      return `${workshop} did not answer in time`;
-    case 'cancelled':
-      return 'Fitting cancelled';
-    case 'held':
+      return [coming(answerBy, `${workshopName} answers by`)];
     case 'accepted':
-    case 'released':
     case 'fitted':
-      return workshop;
+      return [done(decidedAt, `${workshopName} accepted the fitting`)];
+    case 'declined':
+      return [done(decidedAt, `${workshopName} declined`, declineReason)];
+    case 'lapsed':
+      return [done(decidedAt, `${workshopName} did not answer in time`)];
+    case 'cancelled':
+      return [done(decidedAt, `Fitting at ${workshopName} cancelled`)];
+    case 'held':
+    case 'released':
+      return [];
   }
+}
+
+function parcelEvents(parcel: OrderParts['parcels'][number], goingBack: boolean): Event[] {
+  const to = `To ${parcel.address.name}`;
+  if (parcel.state === 'sent') return [done(parcel.sentAt, `${parcel.shop.name} sent a parcel`, to)];
+  if (parcel.state === 'cancelled' || goingBack) return [];
+  return [coming(new Date(`${parcel.dispatchBy}T12:00:00Z`), `${parcel.shop.name} sends a parcel`, to)];
+}
+
+function fittingEvents(parts: OrderParts, goingBack: boolean): Event[] {
+  const current = currentBooking(parts);
+  if (!current) return [];
+  if (parts.fittedAt) return [done(parts.fittedAt, 'Fitted and set up')];
+  if (goingBack || needsChoice(parts)) return [];
+  return [coming(current.start, `Fitting at ${current.workshopName}`)];
+}
+
+const alive = new Set<Booking['state']>(['held', 'requested', 'accepted', 'fitted']);
+
+/** The fitting that counts: the live one, else the latest. One given up for self-fit is history. */
+export function currentBooking({
+  order,
+  bookings,
+}: Pick<OrderParts, 'order' | 'bookings'>): PlacedBooking | null {
+  if (order.fit !== 'workshop') return null;
+  return bookings.find(({ booking }) => alive.has(booking.state)) ?? bookings[0] ?? null;
 }
 
 /** Needs a choice by the rider: paid, to be fitted, and no workshop has it. */
-export const needsChoice = ({ order, booking }: Pick<OrderParts, 'order' | 'booking'>): boolean =>
+export const needsChoice = ({ order, bookings }: Pick<OrderParts, 'order' | 'bookings'>): boolean =>
   order.state === 'paid' &&
   order.fit === 'workshop' &&
-  !(booking && ['requested', 'accepted', 'fitted'].includes(booking.state));
-
-/** What the rider may do now. */
-export function actionsOf(parts: OrderParts): OrderView['actions'] {
-  const { order, parcels } = parts;
-  if (order.state === 'held') return ['pay', 'cancel-payment'];
-  if (order.state !== 'paid') return [];
-  const actions: OrderView['actions'] = [];
-  if (needsChoice(parts)) {
-    actions.push('choose-workshop');
-    if (order.job.selfFitAllowed) actions.push('choose-self-fit');
-  }
-  if (parcels.every((parcel) => parcel.state !== 'sent')) actions.push('refund');
-  return actions;
-}
-
-/** One sentence: what happens next. */
-export function nextOf(parts: OrderParts): string {
-  const { order, booking, parcels, workshopName } = parts;
-  switch (order.state) {
-    case 'held':
-      return 'Pay to keep stock and date; both are held for you until then.';
-    case 'released':
-      return 'Nothing was paid. Your plan and your answers are still there.';
-    case 'refunding':
-      return 'Your money is on its way back.';
-    case 'refunded':
-      return 'Your money has gone back to your card.';
-    case 'completed':
-      return 'Ride, and check sag and bolts after the first rides.';
-    case 'paid':
-      if (needsChoice(parts))
-        return 'Choose another workshop, fit it yourself where that is offered, or have your money back.';
-      if (booking?.state === 'requested')
-        return `${workshopName} has to accept the fitting; parts are sent when it has.`;
-      if (booking?.state === 'accepted') {
-        return parcels.every((parcel) => parcel.state === 'sent')
-          ? `Bring the bike to ${workshopName} on the day.`
-          : `The shops send your parts to ${workshopName}.`;
-      }
-      return 'The shops send your parts to you.';
-  }
-}
+  !bookings.some(({ booking }) => alive.has(booking.state));

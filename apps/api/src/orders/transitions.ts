@@ -1,5 +1,6 @@
 import type { BookingState } from '../fitting-bookings/booking.entity.js';
 import type { PaymentState } from '../payments/payment.entity.js';
+import type { RefundState } from '../payments/refund.entity.js';
 import type { OrderState } from './order.entity.js';
 import type { ParcelState } from './parcel.entity.js';
 
@@ -12,7 +13,8 @@ export const orderTransitions: Table<OrderState> = {
   completed: [],
   released: ['paid', 'refunding'],
   refunding: ['refunded'],
-  refunded: [],
+  // A bank may hand a refund back days after it was done.
+  refunded: ['refunding'],
 };
 
 export const paymentTransitions: Table<PaymentState> = {
@@ -20,6 +22,11 @@ export const paymentTransitions: Table<PaymentState> = {
   open: ['paid', 'expired'],
   expired: ['paid'],
   paid: [],
+};
+
+export const refundTransitions: Table<RefundState> = {
+  pending: ['done'],
+  done: ['pending'],
 };
 
 export const bookingTransitions: Table<BookingState> = {

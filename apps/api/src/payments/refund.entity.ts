@@ -12,6 +12,9 @@ import {
 
 import { Payment } from './payment.entity.js';
 
+/** Done when the provider says so; pending again when the bank has handed the money back. */
+export type RefundState = 'pending' | 'done';
+
 @Entity('refunds')
 @Unique('refunds_provider_once', ['providerRefundId'])
 @Check('refunds_amount_positive', `amount_minor > 0`)
@@ -35,7 +38,7 @@ export class Refund {
   reason: string;
 
   @Column('text')
-  state: 'pending' | 'done';
+  state: RefundState;
 
   @Column('text', { nullable: true })
   providerRefundId: string | null;

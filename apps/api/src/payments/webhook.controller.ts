@@ -9,6 +9,7 @@ import { Answers } from '../common/validation/answers.js';
 import { CONFIG, type Config } from '../config/config.js';
 import { PaymentsException } from './payments.exception.js';
 import { PaymentsService } from './payments.service.js';
+import { RefundsService } from './refunds.service.js';
 import { STRIPE } from './stripe-client.js';
 import { StripeEvent } from './stripe-event.entity.js';
 
@@ -22,6 +23,7 @@ export class StripeWebhookController {
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
     private readonly payments: PaymentsService,
+    private readonly refunds: RefundsService,
     @Inject(STRIPE) private readonly stripe: Stripe,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
@@ -44,7 +46,8 @@ export class StripeWebhookController {
     const kept = await manager.findOneByOrFail(StripeEvent, { id: event.id });
     // Processed before: the provider repeats itself. Failed before: it is tried again.
     if (kept.processedAt) return;
-    if (event.type.startsWith('checkout.session.') && object.id) await this.payments.settle(object.id);
+    if (object.id && event.type.startsWith('checkout.session.')) await this.payments.settle(object.id);
+    if (object.id && event.type.startsWith('refund.')) await this.refunds.settle(object.id);
     await manager.update(StripeEvent, { id: event.id }, { processedAt: this.clock.now() });
   }
 

@@ -23,14 +23,18 @@ import { CurrentMember, type CurrentMemberData } from '../common/access/principa
 import { IfMatch, setVersion } from '../common/http/etag.js';
 import { Answers } from '../common/validation/answers.js';
 import { zod } from '../common/validation/zod.pipe.js';
+import { ParcelsService } from './parcels.service.js';
 import { StockService } from './stock.service.js';
 
 @Controller('organisations/:orgId')
 export class StockController {
-  constructor(private readonly service: StockService) {}
+  constructor(
+    private readonly service: StockService,
+    private readonly parcelsService: ParcelsService,
+  ) {}
 
   @Get('stock')
-  @Member('shop')
+  @Member('shop', ['owner', 'staff'])
   @Answers(stockList)
   stock(@CurrentMember() member: CurrentMemberData): Promise<StockList> {
     return this.service.stock(member.organisationId);
@@ -52,10 +56,10 @@ export class StockController {
   }
 
   @Get('parcels')
-  @Member('shop')
+  @Member('shop', ['owner', 'staff'])
   @Answers(parcelList)
   parcels(@CurrentMember() member: CurrentMemberData): Promise<ParcelList> {
-    return this.service.parcels(member.organisationId);
+    return this.parcelsService.list(member.organisationId);
   }
 
   @Post('parcels/:parcelId/sent')
@@ -66,6 +70,6 @@ export class StockController {
     @Param('parcelId', zod(uuid)) parcelId: string,
     @Body(zod(sentBody)) { tracking }: SentBody,
   ): Promise<ParcelRow> {
-    return this.service.sent(organisationId, parcelId, accountId, tracking);
+    return this.parcelsService.sent(organisationId, parcelId, { accountId, tracking });
   }
 }

@@ -36,6 +36,8 @@ const signedIn = row(accountOr('in'), {});
 /** The patterns that features use; a route that differs writes its own row. */
 export const shopMembers = row(accountOr(404), { 'shop staff': 'in', 'shop owner': 'in' });
 export const workshopMembers = row(accountOr(404), { mechanic: 'in', 'workshop owner': 'in' });
+/** Owner and staff promise dates, mechanics do not. */
+export const workshopDecides = row(accountOr(404), { mechanic: 403, 'workshop owner': 'in' });
 export const measureUpHolders = row(() => 404, { 'measure-up guest': 'in', guest: 'in', rider: 'in' });
 export const orderHolders = row(() => 404, { guest: 'in', rider: 'in' });
 
@@ -83,8 +85,8 @@ export const accessTable: Record<string, Row> = {
 
   'GET /api/organisations/:orgId/bookings': workshopMembers,
   'GET /api/organisations/:orgId/bookings/:bookingId': workshopMembers,
-  'POST /api/organisations/:orgId/bookings/:bookingId/accept': workshopMembers,
-  'POST /api/organisations/:orgId/bookings/:bookingId/decline': workshopMembers,
+  'POST /api/organisations/:orgId/bookings/:bookingId/accept': workshopDecides,
+  'POST /api/organisations/:orgId/bookings/:bookingId/decline': workshopDecides,
   'PUT /api/organisations/:orgId/bookings/:bookingId/record': workshopMembers,
   'POST /api/organisations/:orgId/bookings/:bookingId/fitted': workshopMembers,
 
