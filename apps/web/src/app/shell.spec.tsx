@@ -90,11 +90,12 @@ describe('the shell', () => {
     renderRoutes(routeObjects(), '/contact');
     await heading('Contact');
     const online = vi.spyOn(navigator, 'onLine', 'get').mockReturnValue(false);
+    // The notice listens only once its effects have run, a moment after the page is seen.
     act(() => void window.dispatchEvent(new Event('offline')));
-    expect(screen.getByText(/You are offline/)).toBeInTheDocument();
+    expect(await screen.findByText(/You are offline/)).toBeInTheDocument();
     online.mockReturnValue(true);
     act(() => void window.dispatchEvent(new Event('online')));
-    expect(screen.queryByText(/You are offline/)).not.toBeInTheDocument();
+    await waitFor(() => expect(screen.queryByText(/You are offline/)).not.toBeInTheDocument());
     online.mockRestore();
   });
 });
