@@ -10,6 +10,20 @@ const pages: Record<PagePath, FetchPage> = {
   '/privacy': () => import('../features/company/privacy-page').then((module) => module.PrivacyPage),
   '/returns': () => import('../features/company/returns-page').then((module) => module.ReturnsPage),
   '/contact': () => import('../features/company/contact-page').then((module) => module.ContactPage),
+  '/help': () => import('../features/help/pages/help-index-page').then((module) => module.HelpIndexPage),
+  '/help/eye-to-eye': () =>
+    import('../features/help/pages/eye-to-eye-page').then((module) => module.EyeToEyePage),
+  '/help/stroke-is-not-travel': () =>
+    import('../features/help/pages/stroke-page').then((module) => module.StrokePage),
+  '/help/trunnion': () =>
+    import('../features/help/pages/trunnion-page').then((module) => module.TrunnionPage),
+  '/help/hardware': () =>
+    import('../features/help/pages/hardware-page').then((module) => module.HardwarePage),
+  '/help/air-or-coil': () =>
+    import('../features/help/pages/air-or-coil-page').then((module) => module.AirOrCoilPage),
+  '/help/reservoir': () =>
+    import('../features/help/pages/reservoir-page').then((module) => module.ReservoirPage),
+  '/help/remote': () => import('../features/help/pages/remote-page').then((module) => module.RemotePage),
   '/measure-up': () => import('../features/measure-up/start-page').then((module) => module.StartPage),
   '/measure-up/open': () => import('../features/measure-up/open-page').then((module) => module.OpenPage),
   '/measure-up/:id/matches': () =>

@@ -41,6 +41,7 @@ export function Footer() {
         alignItems="center"
       >
         <chakra.nav aria-label="Company" display="flex" flexWrap="wrap" columnGap="6">
+          <Item to="/help">Help</Item>
           <Item to="/terms">Terms</Item>
           <Item to="/privacy">Privacy</Item>
           <Item to="/returns">Returns</Item>

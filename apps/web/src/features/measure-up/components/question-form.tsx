@@ -14,6 +14,7 @@ import { specs } from '../specs/registry';
 import type { Raw } from '../specs/spec';
 import { useQuestionForm } from '../use-question-form';
 import { FieldView } from './field-view';
+import { HelpLinks } from './help-links';
 import { Beside, MeasureUpFrame, Sheet, stepOf } from './measure-up-frame';
 import { SizeSays } from './size-says';
 
@@ -67,6 +68,7 @@ export function QuestionForm({ view, questionKey }: { view: MeasureUpView; quest
           noValidate
           onSubmit={(event) => void form.submit((value) => send({ state: 'known', value }))(event)}
         >
+          <HelpLinks questionKey={questionKey} />
           {spec.where ? <Disclosure summary="Where do I find this?">{spec.where}</Disclosure> : null}
           {spec.cautions ? <Cautions lines={spec.cautions} /> : null}
           {spec.fields(form.raw, view).map((field) => (
