@@ -30,6 +30,15 @@ describe('shocks', () => {
     );
   });
 
+  it('come with a box, and one maker prints no warranty', () => {
+    for (const { inTheBox, spring } of s.shockModels) {
+      expect(inTheBox[0]).toMatch(/^Shock/);
+      expect(inTheBox.some((line) => /without its spring/.test(line))).toBe(spring === 'coil');
+    }
+    const silent = s.shockModels.filter(({ warrantyMonths }) => warrantyMonths === null);
+    expect(silent.map(({ id }) => id)).toEqual(['hexling-moss-b']);
+  });
+
   it('each have a frame to go in', () => {
     expect(s.shockSizes.filter((size) => framesFor(size).length === 0).map(({ id }) => id)).toEqual([]);
   });

@@ -126,12 +126,14 @@ async function loadCatalogue(client: pg.Client, s: Scenario): Promise<void> {
   await insertRows(
     client,
     'shock_models',
-    s.shockModels.map(({ id, makerId, name, spring, summary }) => ({
+    s.shockModels.map(({ id, makerId, name, spring, summary, warrantyMonths, inTheBox }) => ({
       id,
       maker_id: makerId,
       name,
       spring,
       summary,
+      warranty_months: warrantyMonths,
+      in_the_box: inTheBox,
     })),
   );
   await insertRows(

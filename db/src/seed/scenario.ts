@@ -72,6 +72,9 @@ export interface ShockModel {
   name: string;
   spring: 'air' | 'coil';
   summary: string;
+  /** null where the maker states none. */
+  warrantyMonths: number | null;
+  inTheBox: string[];
 }
 interface Item {
   id: string;

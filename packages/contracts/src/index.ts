@@ -9,3 +9,5 @@ export * from './plans/plans.schema.js';
 export * from './bookings/bookings.schema.js';
 export * from './orders/orders.schema.js';
 export * from './organisations/shop.schema.js';
+export * from './catalogue/storefront.schema.js';
+export * from './organisations/workshops.schema.js';

@@ -14,6 +14,7 @@ import { ShockSize } from './shock-size.entity.js';
 
 @Entity('shock_models')
 @Check('shock_models_spring_known', `spring IN ('air','coil')`)
+@Check('shock_models_warranty_positive', `warranty_months > 0`)
 export class ShockModel {
   @PrimaryColumn('text')
   id: string;
@@ -33,6 +34,14 @@ export class ShockModel {
 
   @Column('text')
   summary: string;
+
+  /** The maker's, beyond what the law gives; null where none is stated. */
+  @Column('integer', { nullable: true })
+  warrantyMonths: number | null;
+
+  /** As the maker lists it; empty where nothing is stated. */
+  @Column('text', { array: true, default: '{}' })
+  inTheBox: string[];
 
   @OneToMany(() => ShockSize, (size) => size.model)
   sizes: Relation<ShockSize>[];

@@ -57,6 +57,11 @@ export const accessTable: Record<string, Row> = {
   'GET /api/frames': everybody,
   'GET /api/frames/:frameId': everybody,
   'GET /api/towns': everybody,
+  'GET /api/shocks': everybody,
+  'GET /api/shocks/sizes': everybody,
+  'GET /api/shocks/:sizeId': everybody,
+  'GET /api/workshops': everybody,
+  'GET /api/workshops/:workshopId': everybody,
 
   'POST /api/measure-ups': everybody,
   'POST /api/measure-ups/open': everybody,
