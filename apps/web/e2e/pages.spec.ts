@@ -50,6 +50,15 @@ async function faults(page: Page, where: string, rules?: string[]): Promise<stri
   return violations.map(({ id, nodes }) => `${where} ${id}: ${nodes.map(({ html }) => html).join(' ')}`);
 }
 
+/** Nothing but a picture of data may be scrolled sideways. */
+async function tooWide(page: Page, where: string): Promise<string[]> {
+  const { width, seen } = await page.evaluate(() => ({
+    width: document.documentElement.scrollWidth,
+    seen: document.documentElement.clientWidth,
+  }));
+  return width > seen ? [`${where} is ${width} px wide at ${seen}`] : [];
+}
+
 /** What the browser complains of. The API may say that something is not there; files may not be missing. */
 function listen(page: Page, found: string[]): void {
   page.on('pageerror', (error) => found.push(`thrown: ${error.message}`));
@@ -83,10 +92,10 @@ for (const [route, { who, paths }] of Object.entries(visits)) {
         await expect(page.locator('html')).toHaveClass(colorScheme);
         const rules = 'rules' in look ? [...look.rules] : undefined;
         found.push(...(await faults(page, `${path} (${width} px, ${colorScheme})`, rules)));
+        found.push(...(await tooWide(page, path)));
       }
-      await page.setViewportSize({ width: 320, height: 800 });
-      const width = await page.evaluate(() => document.documentElement.scrollWidth);
-      if (width > 320) found.push(`${path} is ${width} px wide at 320`);
+      await page.setViewportSize({ width: 320, height: 900 });
+      found.push(...(await tooWide(page, path)));
     }
     await page.close();
     expect(found).toEqual([]);

@@ -3,7 +3,7 @@ import { sagText } from './sag-text.js';
 import { Injectable } from '@nestjs/common';
 import { DataSource } from 'typeorm';
 
-import { frameEndWords, mountWord } from '../frames/mount-words.js';
+import { mountWord } from '../frames/mount-words.js';
 import { frameName } from '../frames/sheet.js';
 import { known } from '../measure-ups/answers.js';
 import type { OpenMeasureUp } from '../measure-ups/measure-ups.service.js';
@@ -133,14 +133,13 @@ function own(open: OpenMeasureUp): MatchesView['own'] {
   if (!drawing) return null;
   const { present } = side;
   const word = (kind: typeof present.bodyEndKind): string => (kind ? mountWord(kind) : 'not known');
-  const entry = side.frame.entries[0];
   return {
     drawing,
     sizeText: size.sizeKey ?? `${drawing.eyeToEyeMm} x ${drawing.strokeMm ?? '?'}`,
     mounts:
       present.bodyEndKind || present.shaftEndKind
         ? `${word(present.bodyEndKind)} / ${word(present.shaftEndKind)}`
-        : `${frameEndWords(entry?.frameEnd ?? null)} / ${frameEndWords(entry?.linkEnd ?? null)}`,
+        : 'not told',
     spring: present.spring ?? 'not known',
     remote: present.remoteAction?.replaceAll('-', ' ') ?? 'not known',
   };

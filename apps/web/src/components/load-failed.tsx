@@ -4,7 +4,16 @@ import { PageHeading } from './page-heading';
 import { isApiProblem } from '../lib/api-problem';
 
 /** A page whose data could not be had: what is the matter, and the next step. */
-export function LoadFailed({ error, what }: { error: Error; what: string }) {
+export function LoadFailed({
+  error,
+  what,
+  next = { to: '/', label: 'To the front page' },
+}: {
+  error: Error;
+  what: string;
+  /** Where the reader can go on. */
+  next?: { to: string; label: string };
+}) {
   const missing = isApiProblem(error) && error.status === 404;
   return (
     <Page width="text">
@@ -19,11 +28,7 @@ export function LoadFailed({ error, what }: { error: Error; what: string }) {
       >
         {missing ? `We cannot show ${what}` : `Could not load ${what}`}
       </PageHeading>
-      {what === 'this order' ? (
-        <LinkButton to="/find-order">Find my order</LinkButton>
-      ) : (
-        <LinkButton to="/">To the front page</LinkButton>
-      )}
+      <LinkButton to={next.to}>{next.label}</LinkButton>
     </Page>
   );
 }

@@ -12,6 +12,13 @@ export const formatDayShort = (day: string): string =>
     .format(asInstant(day))
     .replace(',', '');
 
+/** "10 Dec 2026" from 2026-12-10, never broken over two lines. */
+export const formatDayPlain = (day: string): string =>
+  formatter({ day: 'numeric', month: 'short', year: 'numeric' }, 'UTC')
+    .format(asInstant(day))
+    .replace('Sept', 'Sep')
+    .replaceAll(' ', '\u00a0');
+
 /** "Thursday 10 December 2026" from 2026-12-10. */
 export const formatDay = (day: string): string =>
   formatter({ weekday: 'long', day: 'numeric', month: 'long', year: 'numeric' }, 'UTC')

@@ -40,7 +40,16 @@ export function Footer() {
         columnGap="6"
         alignItems="center"
       >
-        <chakra.nav aria-label="Company" display="flex" flexWrap="wrap" columnGap="6">
+        <chakra.nav
+          aria-label="Company"
+          display="flex"
+          flexWrap="wrap"
+          justifyContent={{ base: 'space-between', md: 'flex-start' }}
+          width={{ base: 'full', md: 'auto' }}
+          columnGap={{ base: '2', md: '6' }}
+        >
+          <Item to="/shocks">Shocks</Item>
+          <Item to="/workshops">Workshops</Item>
           <Item to="/help">Help</Item>
           <Item to="/terms">Terms</Item>
           <Item to="/privacy">Privacy</Item>

@@ -7,6 +7,7 @@ import { Page } from '../../components/page';
 import { PageHeading } from '../../components/page-heading';
 import { Skeleton } from '../../components/skeleton';
 import { TextLink } from '../../components/text-link';
+import { isApiProblem } from '../../lib/api-problem';
 import { usePageTitle } from '../../lib/page-title';
 import { meQuery } from '../auth/api';
 
@@ -26,7 +27,19 @@ export function DeskFrame({
   const { data } = useQuery(meQuery);
   const name = data?.account?.organisations.find(({ id }) => id === orgId)?.name;
   usePageTitle(name ? `${title}, ${name}` : title);
-  if (error) return <LoadFailed error={error} what="this page of the desk" />;
+  if (error) {
+    return (
+      <LoadFailed
+        error={error}
+        what="this page of the desk"
+        next={
+          isApiProblem(error) && error.status === 401
+            ? { to: '/sign-in', label: 'Sign in' }
+            : { to: '/desk', label: 'Your desk' }
+        }
+      />
+    );
+  }
   return (
     <Page>
       <chakra.p marginBottom="2">

@@ -128,7 +128,7 @@ export function StockRow({ orgId, row }: { orgId: string; row: Stock }) {
       </Cell>
       <Cell role="cell" textAlign="right" paddingTop={{ base: '1', md: '4' }}>
         <Above>Held</Above>
-        <chakra.span display="block" lineHeight={{ base: 'var(--chakra-sizes-target)', md: 'inherit' }}>
+        <chakra.span display="block" paddingTop={{ base: '3', md: '0' }}>
           {row.reserved}
         </chakra.span>
       </Cell>

@@ -7,7 +7,7 @@ const Deviation = chakra('span', {
   base: {
     display: 'inline-flex',
     gap: '1',
-    alignItems: 'baseline',
+    alignItems: 'flex-start',
     fontWeight: 'bold',
     borderRadius: 'control',
     paddingInline: '1',
@@ -22,24 +22,28 @@ const Deviation = chakra('span', {
   },
 });
 
+/** A figure and its unit stay on one line. */
+const unbroken = (text: string): string =>
+  text.replace(/(\d) (bar|psi|mm|lb\/in|%|kg|g)(?=\W|$)/g, '$1\u00a0$2');
+
 /** A figure of the fitting sheet: plain where it agrees, in its verdict's colour and shape where it does not. */
 export function CellText({ cell }: { cell: CellView }) {
   const verdict = verdictOfAnswer[cell.answer];
   return (
     <>
       {cell.answer === 'pass' ? (
-        cell.text
+        unbroken(cell.text)
       ) : (
         <Deviation tone={verdictTones[verdict]}>
-          <chakra.span alignSelf="center" flexShrink="0">
+          <chakra.span flexShrink="0" marginTop="1px">
             <VerdictShape verdict={verdict} size={14} />
           </chakra.span>
-          {cell.text}
+          {unbroken(cell.text)}
         </Deviation>
       )}
       {cell.sub ? (
         <chakra.span display="block" color="slate" fontSize="sm" lineHeight="heading" marginTop="0.5">
-          {cell.sub}
+          {unbroken(cell.sub)}
         </chakra.span>
       ) : null}
     </>

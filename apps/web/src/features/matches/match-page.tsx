@@ -14,6 +14,7 @@ import { VerdictBadge } from '../../components/verdict-badge';
 import { VerdictShape } from '../../components/verdict-shape';
 import { verdictOfAnswer, verdictTones, verdictWords } from '../../components/verdict-words';
 import { isApiProblem } from '../../lib/api-problem';
+import { formatDayPlain } from '../../lib/format-date';
 import { formatMoney } from '../../lib/format-money';
 import { usePageTitle } from '../../lib/page-title';
 import { createPlan, matchDetailQuery } from './api';
@@ -30,7 +31,15 @@ export function MatchPage() {
   });
   const name = data ? `${data.row.makerName} ${data.row.modelName} ${data.row.sizeKey}` : 'One shock';
   usePageTitle(name);
-  if (error) return <LoadFailed error={error} what="this shock" />;
+  if (error) {
+    return (
+      <LoadFailed
+        error={error}
+        what="this shock"
+        next={{ to: `/measure-up/${id}/matches`, label: 'To the fitting sheet' }}
+      />
+    );
+  }
   if (!data) {
     return (
       <Page>
@@ -183,7 +192,7 @@ function CheckItem({ check, measureUpId }: { check: CheckView; measureUpId: stri
                 <chakra.dd fontWeight="bold">{figure.text}</chakra.dd>
                 <chakra.dd color="slate">
                   {figure.source.label}
-                  {figure.source.date ? `, ${figure.source.date}` : ''}
+                  {figure.source.date ? `, ${formatDayPlain(figure.source.date)}` : ''}
                 </chakra.dd>
               </chakra.div>
             ))}

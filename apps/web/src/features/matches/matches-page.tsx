@@ -8,9 +8,13 @@ import { Page } from '../../components/page';
 import { PageHeading } from '../../components/page-heading';
 import { Skeleton } from '../../components/skeleton';
 import { TextLink } from '../../components/text-link';
+import { isApiProblem } from '../../lib/api-problem';
 import { usePageTitle } from '../../lib/page-title';
+import { useMedia } from '../../lib/use-media';
 import { matchesQueryOptions } from './api';
-import { MatchCards, MatchTable, sheetOf } from './match-rows';
+import { MatchCards } from './match-cards';
+import { sheetOf } from './match-groups';
+import { MatchTable } from './match-table';
 import { Sentence } from './sentence';
 
 /** The fitting sheet. */
@@ -21,7 +25,20 @@ export function MatchesPage() {
   const { data: view, error, isPlaceholderData } = useQuery(matchesQueryOptions(id, text ? `?${text}` : ''));
   usePageTitle(view ? `Fitting sheet: ${view.title}` : 'Fitting sheet');
   const sheet = useMemo(() => (view && view.rows.length > 0 ? sheetOf(view) : null), [view]);
-  if (error) return <LoadFailed error={error} what="this fitting sheet" />;
+  const wide = useMedia('(min-width: 64rem)');
+  if (error) {
+    return (
+      <LoadFailed
+        error={error}
+        what="this fitting sheet"
+        next={
+          isApiProblem(error) && error.status === 409
+            ? { to: `/measure-up/${id}/frame`, label: 'Choose your frame' }
+            : { to: '/measure-up', label: 'Your measure-up' }
+        }
+      />
+    );
+  }
   if (!view) {
     return (
       <Page>
@@ -48,10 +65,11 @@ export function MatchesPage() {
       </chakra.p>
       <chakra.div aria-busy={isPlaceholderData} opacity={isPlaceholderData ? '0.6' : '1'}>
         {sheet ? (
-          <>
+          wide ? (
             <MatchTable view={view} sheet={sheet} />
+          ) : (
             <MatchCards view={view} sheet={sheet} />
-          </>
+          )
         ) : (
           <Notice tone="heather" title="Nothing on sale fits with this sentence">
             <p>

@@ -17,6 +17,8 @@ const Word = chakra('select', {
     borderBottomWidth: '2px',
     borderColor: 'bracken',
     cursor: 'pointer',
+    // As wide as the word that is chosen, where the browser can; the comma then stands beside it.
+    fieldSizing: 'content',
     maxWidth: 'full',
     '& option': { bg: 'paper', color: 'ink', fontWeight: 'normal' },
   },

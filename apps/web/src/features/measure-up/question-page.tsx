@@ -19,7 +19,14 @@ export function QuestionPage() {
   useEffect(() => {
     if (view) remember(view.id);
   }, [view]);
-  if (error) return <LoadFailed error={error} what="these answers" />;
+  if (error)
+    return (
+      <LoadFailed
+        error={error}
+        what="these answers"
+        next={{ to: '/measure-up', label: 'Start a measure-up' }}
+      />
+    );
   if (!view) {
     return (
       <Page width="form">

@@ -34,7 +34,10 @@ export function OrderPage() {
   const { reference = '' } = useParams();
   const { data: order, error } = useQuery(orderQuery(reference));
   usePageTitle(`Order ${reference}`);
-  if (error) return <LoadFailed error={error} what="this order" />;
+  if (error)
+    return (
+      <LoadFailed error={error} what="this order" next={{ to: '/find-order', label: 'Find my order' }} />
+    );
   if (!order) {
     return (
       <Page>

@@ -34,7 +34,10 @@ export function PlanPage() {
   const { planId = '' } = useParams();
   const { data: plan, error } = useQuery(planQuery(planId));
   usePageTitle(plan ? `Plan: ${plan.shock.modelName}` : 'Plan');
-  if (error) return <LoadFailed error={error} what="this plan" />;
+  if (error)
+    return (
+      <LoadFailed error={error} what="this plan" next={{ to: '/measure-up', label: 'Your measure-up' }} />
+    );
   if (!plan) {
     return (
       <Page>

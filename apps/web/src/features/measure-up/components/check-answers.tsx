@@ -15,7 +15,8 @@ function words(view: MeasureUpView, key: (typeof view.questions)[number]['key'])
   const stored = view.answers[key] as StoredAnswer | undefined;
   if (!stored) return 'Not answered';
   if (stored.state === 'unknown') return 'I don’t know';
-  return key === 'frame' ? view.title : specs[key].summary(stored.value as never);
+  const said = key === 'frame' ? view.title : specs[key].summary(stored.value as never);
+  return said.charAt(0).toUpperCase() + said.slice(1);
 }
 
 /** All answers on one page, each with a way to change it, and the way on to the matches. */

@@ -1,7 +1,7 @@
 import type { AnswerValue, FrameSummary, MeasureUpView, StoredAnswer } from '@linkfell/contracts';
 import { chakra } from '@chakra-ui/react';
 import { useQuery } from '@tanstack/react-query';
-import { useDeferredValue, useMemo } from 'react';
+import { useDeferredValue, useMemo, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { Button } from '../../../components/button';
 import { ChoiceGroup } from '../../../components/forms/choice-group';
@@ -21,6 +21,15 @@ import { SheetFigures } from './sheet-figures';
 
 type Frame = AnswerValue<'frame'>;
 const title = 'Which frame is it?';
+/** More than a telephone shows at once is asked for, so that the way on stays near. */
+const atFirst = 8;
+
+const counted = (count: number): string =>
+  count === 0
+    ? 'No frame in our list is called that. Choose “Not listed: describe it” above.'
+    : count === 1
+      ? '1 frame'
+      : `${count} frames`;
 
 const fields: readonly FieldSpec[] = [
   { type: 'text', name: 'kind', label: 'Frame' },
@@ -67,7 +76,14 @@ export function FrameQuestion({ view }: { view: MeasureUpView }) {
   const { raw, change, fault } = form;
   usePageTitle(title, { error: form.faults.length > 0 });
   const found = useQuery(framesQuery(useDeferredValue(raw.q ?? '')));
-  const frames = found.data?.frames ?? [];
+  const [all, setAll] = useState(false);
+  const listed = found.data?.frames ?? [];
+  // The answer that is changed stands on top; a choice made now stays where it was made.
+  const frames = [
+    ...listed.filter(({ id }) => id === start.frameId),
+    ...listed.filter(({ id }) => id !== start.frameId),
+  ];
+  const shown = all ? frames : frames.filter(({ id }, index) => index < atFirst || id === raw.frameId);
 
   const send = (value: unknown) =>
     answer.mutate(
@@ -132,14 +148,14 @@ export function FrameQuestion({ view }: { view: MeasureUpView }) {
               )}
             </Field>
             <chakra.p role="status" color="slate" fontSize="sm" marginBottom="2">
-              {found.isSuccess ? `${frames.length} frames` : 'Looking'}
+              {found.isSuccess ? counted(frames.length) : 'Looking'}
             </chakra.p>
             <ChoiceGroup
               id="frameId"
               name="frameId"
               legend="Frames"
               error={fault('frameId')}
-              choices={frames.map((frame) => ({
+              choices={shown.map((frame) => ({
                 value: frame.id,
                 label: nameOf(frame),
                 hint: `${[...new Set(frame.travelMm)].join(' or ')} mm travel · takes ${[...new Set(frame.sizes)].join(' or ')}`,
@@ -147,6 +163,13 @@ export function FrameQuestion({ view }: { view: MeasureUpView }) {
               value={raw.frameId ?? null}
               onChange={(frameId) => change({ frameId, frameSize: '', chip: '', modelYear: '' })}
             />
+            {shown.length < frames.length ? (
+              <chakra.div marginBottom="6">
+                <Button tone="plain" onClick={() => setAll(true)}>
+                  Show all {frames.length} frames
+                </Button>
+              </chakra.div>
+            ) : null}
             {raw.frameId ? (
               <Variant frameId={raw.frameId} raw={raw} change={change} error={fault('modelYear')} />
             ) : null}

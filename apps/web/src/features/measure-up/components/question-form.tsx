@@ -81,7 +81,7 @@ export function QuestionForm({ view, questionKey }: { view: MeasureUpView; quest
             />
           ))}
           <SizeSays view={view} questionKey={questionKey} />
-          <chakra.div display="flex" flexWrap="wrap" gap="3" marginTop="6">
+          <chakra.div display="flex" flexWrap="wrap" columnGap="3" rowGap="1" marginTop="6">
             <Button type="submit" size="large" busy={answer.isPending && 'Saving'}>
               Continue
             </Button>
@@ -91,7 +91,11 @@ export function QuestionForm({ view, questionKey }: { view: MeasureUpView; quest
               </Button>
             ) : null}
             {before ? (
-              <Button tone="quiet" onClick={() => void navigate(`/measure-up/${view.id}/${before}`)}>
+              <Button
+                tone="quiet"
+                marginLeft="-2"
+                onClick={() => void navigate(`/measure-up/${view.id}/${before}`)}
+              >
                 Back
               </Button>
             ) : null}

@@ -1,6 +1,6 @@
 import type { AnswerValue } from '@linkfell/contracts';
 import { findSizeKey } from '@linkfell/fit-engine';
-import { YourShock } from './drawings';
+import { HardwareSoFar, YourShock } from './drawings';
 import { awkwardField, lengthOf, mm, rawLength, toolField, typedOf } from './read';
 import { question, type FieldSpec, type Raw } from './spec';
 
@@ -28,6 +28,14 @@ const hardwareEnd = (end: 'frame' | 'link', name: string): readonly FieldSpec[] 
   },
   { type: 'number', name: `${end}-bolt`, label: `Bolt at the ${name} end`, units: ['mm'], optional: true },
   {
+    type: 'number',
+    name: `${end}-bore`,
+    label: `Hole of the eye at the ${name} end`,
+    hint: 'Across, with the hardware out. Without it we count new hardware.',
+    units: ['mm'],
+    optional: true,
+  },
+  {
     type: 'choice',
     name: `${end}-sound`,
     label: 'Its state',
@@ -41,10 +49,12 @@ const hardwareEnd = (end: 'frame' | 'link', name: string): readonly FieldSpec[] 
 ];
 
 function endOf(raw: Raw, end: 'frame' | 'link'): unknown {
-  if (!(raw[`${end}-width`] ?? '').trim() && !(raw[`${end}-bolt`] ?? '').trim()) return null;
+  const typed = (field: string): boolean => (raw[`${end}-${field}`] ?? '').trim() !== '';
+  if (!typed('width') && !typed('bolt') && !typed('bore')) return null;
   const sound = raw[`${end}-sound`];
   return {
-    boreMm: 15,
+    // Never guessed: old hardware moves across only into an eye of the same hole.
+    boreMm: typed('bore') ? lengthOf(raw, `${end}-bore`) : null,
     widthMm: lengthOf(raw, `${end}-width`),
     boltMm: lengthOf(raw, `${end}-bolt`),
     sound: sound === 'yes' ? true : sound === 'no' ? false : null,
@@ -56,6 +66,7 @@ const endRaw = (end: 'frame' | 'link', value: AnswerValue<'hardware'>['frameEnd'
     ? {
         ...rawLength(`${end}-width`, value.widthMm),
         ...rawLength(`${end}-bolt`, value.boltMm),
+        ...(value.boreMm === null ? {} : rawLength(`${end}-bore`, value.boreMm)),
         [`${end}-sound`]: value.sound === null ? 'unseen' : value.sound ? 'yes' : 'no',
       }
     : {};
@@ -74,7 +85,8 @@ export const shockSpecs = {
     ],
     toValue: (raw) => ({ text: raw.text ?? '', sizeKey: findSizeKey(raw.text ?? '') ?? undefined }),
     fromValue: (value) => ({ text: value.text }),
-    summary: (value) => `${value.text} (${value.sizeKey})`,
+    summary: (value) =>
+      value.text === value.sizeKey ? value.text : `${value.text}, that is ${value.sizeKey}`,
     unknown: 'Then we work the size out from what you measure.',
     drawing: (raw, view) => {
       const key = findSizeKey(raw.text ?? '')
@@ -234,8 +246,14 @@ export const shockSpecs = {
     fromValue: (value) => ({ ...endRaw('frame', value.frameEnd), ...endRaw('link', value.linkEnd) }),
     start: { 'frame-sound': 'unseen', 'link-sound': 'unseen' },
     summary: ({ frameEnd, linkEnd }) =>
-      [frameEnd, linkEnd].map((end) => (end ? `${end.widthMm}x${end.boltMm}` : 'none')).join(' / '),
+      [frameEnd, linkEnd].map((end) => (end ? `${end.widthMm}x${end.boltMm} mm` : 'none')).join(' / '),
     unknown: 'Then new hardware is counted wherever the frame needs some.',
+    drawing: (raw) => (
+      <>
+        <HardwareSoFar raw={raw} end="frame" />
+        <HardwareSoFar raw={raw} end="link" />
+      </>
+    ),
   }),
   'can-diameter': question<AnswerValue<'can-diameter'>>({
     title: 'How thick is its body?',
