@@ -115,3 +115,13 @@ export interface Judgement {
   advice: readonly Advice[];
   selfFitAllowed: boolean;
 }
+
+/** A shock that the cheap checks refuse, as short as it can be told; `judge` tells the rest. */
+export interface Refusal {
+  verdict: 'wont-fit';
+  /** The first check that fails where the shock comes nearest to fitting, with its code. */
+  check: CheckId;
+  code: string;
+  entryId: string;
+  wayRound: 'body-to-frame' | 'body-to-link';
+}

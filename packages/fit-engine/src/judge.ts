@@ -1,9 +1,10 @@
-import type { Judgement, PartNeed, Verdict, WorkNeed } from './answers.js';
+import type { Judgement, PartNeed, Refusal, Verdict, WorkNeed } from './answers.js';
 import { advise } from './advice.js';
-import type { FitQuestion, ShockFacts } from './facts.js';
+import type { FitQuestion, SheetEntry, ShockFacts } from './facts.js';
 import { rankOf, worst, type Shared } from './rules/context.js';
 import { entryApplies } from './rules/entry-applies.js';
 import { beginAll, compare, costOf, finish, type Begun, type Outcome } from './rules/run-trial.js';
+import { Screen } from './screening/screen.js';
 import { presentSize } from './sizing/present-size.js';
 
 const verdicts: readonly Verdict[] = ['bolts-straight-in', 'fits-with-work', 'needs-an-answer', 'wont-fit'];
@@ -20,14 +21,13 @@ function bestOf(trials: readonly Begun[]): Outcome | null {
   return best;
 }
 
-function judgeWith(question: FitQuestion, shared: Shared, full: boolean): Judgement {
-  const { entries } = question.frame;
-  // An entry for another year, size or chip position must neither save a shock nor condemn it.
-  const speaking = entries.filter((entry) => shared.applies.get(entry)?.state !== 'no');
-  const trials = beginAll({ ...question, shared, full }, speaking.length > 0 ? speaking : entries);
-  const best = bestOf(trials);
-  if (!best) throw new RangeError('a frame needs at least one entry');
-  const { answers, trial, spring, positionDeg } = best;
+/** An entry for another year, size or chip position must neither save a shock nor condemn it. */
+function speakingEntries({ frame }: Pick<FitQuestion, 'frame'>, shared: Shared): readonly SheetEntry[] {
+  const speaking = frame.entries.filter((entry) => shared.applies.get(entry)?.state !== 'no');
+  return speaking.length > 0 ? speaking : frame.entries;
+}
+
+function judgementOf({ answers, trial, spring, positionDeg }: Outcome): Judgement {
   const parts: PartNeed[] = [];
   const work: WorkNeed[] = [];
   for (const given of answers) {
@@ -65,11 +65,40 @@ function sharedBy({ frame, present, rider }: Pick<FitQuestion, 'frame' | 'presen
  * @param full look at the costly checks even where a cheap one has refused
  * @throws RangeError for a frame without entries
  */
-export const judge = (question: FitQuestion, { full = false } = {}): Judgement =>
-  judgeWith(question, sharedBy(question), full);
-
-/** The same for many shocks; what does not depend on the shock is worked out once. */
-export function judgeAll(base: Omit<FitQuestion, 'shock'>, shocks: readonly ShockFacts[]): Judgement[] {
-  const shared = sharedBy(base);
-  return shocks.map((shock) => judgeWith({ ...base, shock }, shared, false));
+export function judge(question: FitQuestion, { full = false } = {}): Judgement {
+  const shared = sharedBy(question);
+  const best = bestOf(beginAll({ ...question, shared, full }, speakingEntries(question, shared)));
+  if (!best) throw new RangeError('a frame needs at least one entry');
+  return judgementOf(best);
 }
+
+function screenOf(base: Omit<FitQuestion, 'shock'>): Screen {
+  const shared = sharedBy(base);
+  return new Screen(base, shared, speakingEntries(base, shared));
+}
+
+/**
+ * The same for many shocks; what does not depend on the shock is worked out once.
+ * @throws RangeError for a frame without entries
+ */
+export function judgeAll(base: Omit<FitQuestion, 'shock'>, shocks: readonly ShockFacts[]): Judgement[] {
+  const screen = screenOf(base);
+  return shocks.map((shock) => judgementOf(screen.outcome(shock)));
+}
+
+/**
+ * A catalogue gone through: the judgement of every shock that may fit, and of the many that do not only which check
+ * refuses them. Verdict, entry, way round and the first check that fails are those of `judge`. A shock that the
+ * costly check alone refuses has its judgement too.
+ * @throws RangeError for a frame without entries
+ */
+export function screenAll(
+  base: Omit<FitQuestion, 'shock'>,
+  shocks: readonly ShockFacts[],
+): (Judgement | Refusal)[] {
+  const screen = screenOf(base);
+  return shocks.map((shock) => screen.refusal(shock) ?? judgementOf(screen.outcome(shock)));
+}
+
+/** Whether a shock that was gone through has its judgement, with answers and figures. */
+export const isJudged = (one: Judgement | Refusal): one is Judgement => 'answers' in one;

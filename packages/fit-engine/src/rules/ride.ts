@@ -16,6 +16,10 @@ export interface Ride {
   lowLoadN: number;
   highLoadN: number;
   patmKPa: number;
+  /** The sag aimed at, mm at the shock, and the leverage there and at the softest end of the window. */
+  sagMm: number;
+  sagRatio: number;
+  softestRatio: number;
 }
 export type RideResult = { ride: Ride } | { missing: AskNeed[] };
 
@@ -53,14 +57,19 @@ function workOut({ rider, frame, entry }: Trial, key: string): RideResult {
   }
   const load = (shift: number): number =>
     wheelLoadN(riderKg, kitKg, bikeKg, { ...usualShares, rearShare: usualShares.rearShare + shift });
+  const { curve } = made;
+  const sagMm = (window.midPercent / 100) * curve.strokeMm;
   return {
     ride: {
-      curve: made.curve,
+      curve,
       window,
       loadN: load(0),
       lowLoadN: load(-0.05),
       highLoadN: load(0.05),
       patmKPa: patmAtHeightKPa(fillingHeightM),
+      sagMm,
+      sagRatio: curve.ratioAt(sagMm),
+      softestRatio: curve.ratioAt((window.highPercent / 100) * curve.strokeMm),
     },
   };
 }

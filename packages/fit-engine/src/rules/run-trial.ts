@@ -7,7 +7,7 @@ import { mountsCheck } from './mounts.js';
 import { eBikeCheck, noticesCheck, positionCheck, readingConflictCheck } from './others.js';
 import { pressureCheck } from './pressure.js';
 import { remoteCheck } from './remote.js';
-import { reservoirCheck } from './reservoir.js';
+import { reservoirCheck, type ReservoirAnswer } from './reservoir.js';
 import { riderWeightCheck } from './rider-weight.js';
 import { sizeChecks } from './size.js';
 import { springRateCheck } from './spring-rate.js';
@@ -50,7 +50,7 @@ export interface Begun {
   cost: number[];
 }
 
-const ways = ['body-to-frame', 'body-to-link'] as const;
+export const ways = ['body-to-frame', 'body-to-link'] as const;
 
 /**
  * The cheap checks of a shock against some entries, both ways round. What depends neither on the entry nor on the way
@@ -91,6 +91,19 @@ export function finish({ trial, before, after, spring, cost }: Begun): Outcome {
     spring,
     positionDeg: room?.positionDeg ?? null,
   };
+}
+
+/** All answers of one way of putting a shock in, without trying any other. */
+export function outcomeOf(trial: Trial, room: ReservoirAnswer | null): Outcome {
+  const [eye, stroke] = sizeChecks(trial);
+  const [rate, pressure] = [springRateCheck(trial), pressureCheck(trial)];
+  const answers = [eye, stroke, mountsCheck(trial), hardwareCheck(trial), springTypeCheck(trial)];
+  answers.push(coilOnYokeCheck(trial), rate.answer, pressure.answer, riderWeightCheck(trial));
+  if (room) answers.push(room.answer);
+  answers.push(diameterCheck(trial), remoteCheck(trial), positionCheck(trial));
+  answers.push(eBikeCheck(trial), noticesCheck(trial), readingConflictCheck(trial));
+  const spring = trial.shock.spring.kind === 'coil' ? rate.spring : pressure.spring;
+  return { trial, answers, spring, positionDeg: room?.positionDeg ?? null };
 }
 
 /** The worst answer, then how many fail, are not known, need work; then parts. */

@@ -24,13 +24,17 @@ export function springRateCheck(trial: Trial): SpringAnswer {
   if ('missing' in found) {
     return alone(answer('spring-rate', 'unknown', 'spring-rate-not-known', { ask: found.missing }));
   }
-  const key = `${spring.springInsideMm}|${spring.maxFreeLengthMm}|${spring.collarPitchMm}`;
+  const key = `${spring.springInsideMm}|${longestFor(trial.sale.coils, spring)}|${spring.collarPitchMm}`;
   const ofRide = shared.coils.get(found.ride) ?? new Map<string, SpringAnswer>();
   shared.coils.set(found.ride, ofRide);
   const chosen = ofRide.get(key) ?? choose(trial, found.ride, spring);
   ofRide.set(key, chosen);
   return chosen;
 }
+
+/** The longest spring on sale that goes in: shocks that take it and none longer have the same choice. */
+const longestFor = (all: readonly CoilOnSale[], { maxFreeLengthMm }: CoilShock): number =>
+  all.reduce((most, { freeLengthMm: mm }) => (mm <= maxFreeLengthMm && mm > most ? mm : most), -Infinity);
 
 /** Springs that go on this shock: inside diameter, length, and travel for the whole stroke and the preload. */
 const springsFor = (all: readonly CoilOnSale[], spring: CoilShock, leastTravelMm: number): CoilOnSale[] =>

@@ -10,15 +10,21 @@ export function sharesFromLogs(logs: readonly number[]): number[] {
 /** Log of the normal density less its constant: ranking needs no more. */
 export const logNormal = (deviation: number, u: number): number => -0.5 * (deviation / u) ** 2 - Math.log(u);
 
+const steps = 80;
+
 /** Log of the mean of exp(f) over an interval, by the trapezoid rule with 80 steps. */
 export function logMeanExp(f: (x: number) => number, from: number, to: number): number {
-  const steps = 80;
-  const values = Array.from({ length: steps + 1 }, (_, i) => f(from + ((to - from) * i) / steps));
-  const top = Math.max(...values);
+  const values = new Float64Array(steps + 1);
+  let top = -Infinity;
+  for (let i = 0; i <= steps; i += 1) {
+    const value = f(from + ((to - from) * i) / steps);
+    values[i] = value;
+    top = Math.max(top, value);
+  }
   if (!Number.isFinite(top)) return -Infinity;
-  const sum = values.reduce((total, value, i) => {
-    const weight = i === 0 || i === steps ? 0.5 : 1;
-    return total + weight * Math.exp(value - top);
-  }, 0);
+  let sum = 0;
+  for (let i = 0; i <= steps; i += 1) {
+    sum += (i === 0 || i === steps ? 0.5 : 1) * Math.exp((values[i] ?? 0) - top);
+  }
   return top + Math.log(sum / steps);
 }

@@ -7,8 +7,11 @@ export interface AirState extends AirChambers {
 }
 
 /** Filled at full extension: the same pressure on both sides. */
-export const filledState = (chambers: AirChambers, fillAbsKPa: number): AirState => ({
-  ...chambers,
+export const filledState = (c: AirChambers, fillAbsKPa: number): AirState => ({
+  areaMm2: c.areaMm2,
+  negativeAreaMm2: c.negativeAreaMm2,
+  volumeMm3: c.volumeMm3,
+  negativeVolumeMm3: c.negativeVolumeMm3,
   positiveKPa: fillAbsKPa,
   negativeKPa: fillAbsKPa,
 });

@@ -33,10 +33,15 @@ export function fillForSag(
   gasN = 0,
 ): number | null {
   if (!(sagMm >= 0) || sagMm > curve.strokeMm) return null;
+  return fillForForce(c, loadN * curve.ratioAt(sagMm) - gasN, sagMm, patmKPa);
+}
+
+/** The same for a force on the shaft, N, where the leverage at the sag is known already. */
+export function fillForForce(c: AirChambers, forceN: number, sagMm: number, patmKPa: number): number | null {
   // Force per kPa of fill, so that nothing is worked out twice in two ways.
   const perKPa = stateForceN(movedState(filledState(c, 1), sagMm, 1), 0);
   if (!(perKPa > 0)) return null;
-  const neededN = loadN * curve.ratioAt(sagMm) - gasN + ((c.areaMm2 - c.negativeAreaMm2) * patmKPa) / 1000;
+  const neededN = forceN + ((c.areaMm2 - c.negativeAreaMm2) * patmKPa) / 1000;
   const gauge = neededN / perKPa - patmKPa;
   return Number.isFinite(gauge) && gauge > 0 ? gauge : null;
 }
@@ -63,11 +68,20 @@ export function leastFillKPa(
   softestSagPercent: number,
   patmKPa: number,
 ): number | null {
-  if (!(diameterMm > 4) || !Number.isFinite(diameterMm)) return null;
-  const area = (Math.PI / 4) * (diameterMm - 4) ** 2;
   const fraction = softestSagPercent / 100;
+  return leastFillForForce(diameterMm, loadN * curve.ratioAt(fraction * curve.strokeMm), fraction, patmKPa);
+}
+
+/** The same for a force on the shaft, N, at the softest sag, a fraction of the stroke. */
+export function leastFillForForce(
+  diameterMm: number,
+  forceN: number,
+  fraction: number,
+  patmKPa: number,
+): number | null {
+  if (!(diameterMm > 4) || !Number.isFinite(diameterMm)) return null;
   if (!(fraction >= 0 && fraction <= 1)) return null;
-  const force = loadN * curve.ratioAt(fraction * curve.strokeMm);
-  const gauge = ((1000 * force) / area + patmKPa) * (1 - 0.75 * fraction) - patmKPa;
+  const area = (Math.PI / 4) * (diameterMm - 4) ** 2;
+  const gauge = ((1000 * forceN) / area + patmKPa) * (1 - 0.75 * fraction) - patmKPa;
   return Number.isFinite(gauge) ? Math.max(gauge, 0) : null;
 }
