@@ -63,6 +63,11 @@ export const visits: Record<PagePath, Visit> = {
   '/help/air-or-coil': rider('/help/air-or-coil'),
   '/help/reservoir': rider('/help/reservoir'),
   '/help/remote': rider('/help/remote'),
+  '/shocks': rider('/shocks', '/shocks?q=tarn', '/shocks?q=nothing+of+that+name'),
+  '/shocks/sizes/:sizeKey': rider('/shocks/sizes/210x50', '/shocks/sizes/211x55'),
+  '/shocks/:sizeId': rider(`/shocks/${shock}`, '/shocks/no-such-shock'),
+  '/workshops': rider('/workshops', '/workshops?from=skelhow'),
+  '/workshops/:workshopId': rider(`/workshops/${workshop}`, '/workshops/nobody'),
   '/measure-up': rider('/measure-up'),
   '/measure-up/open': rider('/measure-up/open#not-a-token-that-opens'),
   '/measure-up/:id/matches': about(({ measureUp, empty }) => [

@@ -24,6 +24,12 @@ const pages: Record<PagePath, FetchPage> = {
   '/help/reservoir': () =>
     import('../features/help/pages/reservoir-page').then((module) => module.ReservoirPage),
   '/help/remote': () => import('../features/help/pages/remote-page').then((module) => module.RemotePage),
+  '/shocks': () => import('../features/catalogue/shocks-page').then((module) => module.ShocksPage),
+  '/shocks/sizes/:sizeKey': () => import('../features/catalogue/size-page').then((module) => module.SizePage),
+  '/shocks/:sizeId': () => import('../features/catalogue/shock-page').then((module) => module.ShockPage),
+  '/workshops': () => import('../features/workshops/workshops-page').then((module) => module.WorkshopsPage),
+  '/workshops/:workshopId': () =>
+    import('../features/workshops/workshop-page').then((module) => module.WorkshopPage),
   '/measure-up': () => import('../features/measure-up/start-page').then((module) => module.StartPage),
   '/measure-up/open': () => import('../features/measure-up/open-page').then((module) => module.OpenPage),
   '/measure-up/:id/matches': () =>

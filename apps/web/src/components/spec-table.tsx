@@ -44,12 +44,15 @@ export function SpecTable({ caption, rows }: { caption: string; rows: readonly S
                 </chakra.span>
               ) : null}
             </Head>
-            <Cell textAlign="right" fontWeight="bold">
+            {/* Words reach to the edge; figures stand before their units. */}
+            <Cell textAlign="right" fontWeight="bold" colSpan={row.unit ? 1 : 2}>
               {row.value}
             </Cell>
-            <Cell paddingLeft="1" color="slate" width="1%" whiteSpace="nowrap">
-              {row.unit ?? ''}
-            </Cell>
+            {row.unit ? (
+              <Cell paddingLeft="1" color="slate" width="1%" whiteSpace="nowrap">
+                {row.unit}
+              </Cell>
+            ) : null}
           </tr>
         ))}
       </tbody>

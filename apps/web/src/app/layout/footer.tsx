@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 
 const Item = chakra(Link, {
@@ -25,6 +26,20 @@ const Ridge = () => (
   </chakra.svg>
 );
 
+/** A row of links; on a telephone as wide as the page. */
+const Links = ({ label, children }: { label: string; children: ReactNode }) => (
+  <chakra.nav
+    aria-label={label}
+    display="flex"
+    flexWrap="wrap"
+    justifyContent={{ base: 'space-between', md: 'flex-start' }}
+    width={{ base: 'full', md: 'auto' }}
+    columnGap={{ base: '2', md: '6' }}
+  >
+    {children}
+  </chakra.nav>
+);
+
 export function Footer() {
   return (
     <chakra.footer marginTop="auto">
@@ -40,22 +55,17 @@ export function Footer() {
         columnGap="6"
         alignItems="center"
       >
-        <chakra.nav
-          aria-label="Company"
-          display="flex"
-          flexWrap="wrap"
-          justifyContent={{ base: 'space-between', md: 'flex-start' }}
-          width={{ base: 'full', md: 'auto' }}
-          columnGap={{ base: '2', md: '6' }}
-        >
+        <Links label="Look around">
           <Item to="/shocks">Shocks</Item>
           <Item to="/workshops">Workshops</Item>
           <Item to="/help">Help</Item>
+        </Links>
+        <Links label="Company">
           <Item to="/terms">Terms</Item>
           <Item to="/privacy">Privacy</Item>
           <Item to="/returns">Returns</Item>
           <Item to="/contact">Contact</Item>
-        </chakra.nav>
+        </Links>
         <chakra.p fontSize="sm" color="slate" marginLeft={{ md: 'auto' }} maxWidth="line">
           A demonstration. Linkfell Ltd, its partners and its places are invented; nothing is sold.
         </chakra.p>

@@ -41,6 +41,13 @@ const Item = chakra(NavLink, {
   },
 });
 
+/** Ways to look around: on a telephone at the foot of the page. */
+const looking = [
+  { to: '/shocks', name: 'Shocks' },
+  { to: '/workshops', name: 'Workshops' },
+  { to: '/help', name: 'Help' },
+] as const;
+
 /** On a telephone two rows: the name and the colours, then the three ways in. */
 export function Header() {
   const signedIn = useSignedIn();
@@ -69,6 +76,11 @@ export function Header() {
           width={{ base: 'full', md: 'auto' }}
         >
           <Item to="/measure-up">Measure-up</Item>
+          {looking.map(({ to, name }) => (
+            <Item key={to} to={to} display={{ base: 'none', md: 'inline-flex' }}>
+              {name}
+            </Item>
+          ))}
           <Item to="/find-order">Find my order</Item>
           {/* As wide as either word, so that the rest of the header stays where it is. */}
           <Item

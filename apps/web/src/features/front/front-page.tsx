@@ -1,6 +1,7 @@
 import { Page } from '../../components/page';
 import { Hero } from './hero';
 import { HowItGoes } from './how-it-goes';
+import { LookAround } from './look-around';
 import { Partners } from './partners';
 import { TrustFacts } from './trust-facts';
 import { VerdictKey } from './verdict-key';
@@ -12,6 +13,7 @@ export function FrontPage() {
       <TrustFacts />
       <HowItGoes />
       <VerdictKey />
+      <LookAround />
       <Partners />
     </Page>
   );

@@ -2,7 +2,7 @@ import { ShockDrawing } from '../../../components/drawing/shock-drawing';
 import { commonSheet } from '../../../components/drawing/sheet';
 import { TextLink } from '../../../components/text-link';
 import { airOut, asPrinted, coilOff } from '../cautions';
-import { DrawingSheet } from '../drawing-sheet';
+import { DrawingSheet } from '../../../components/drawing-sheet';
 import { coil, inlineAir } from '../figures/example-shocks';
 import { SpringChart } from '../figures/spring-chart';
 import { HelpPage } from '../help-page';

@@ -1,7 +1,7 @@
 import { ShockDrawing } from '../../../components/drawing/shock-drawing';
 import { TextLink } from '../../../components/text-link';
 import { airOut, asPrinted, coilOff } from '../cautions';
-import { DrawingSheet } from '../drawing-sheet';
+import { DrawingSheet } from '../../../components/drawing-sheet';
 import { inlineAir } from '../figures/example-shocks';
 import { SameEdgeDrawing } from '../figures/same-edge-drawing';
 import { HelpPage } from '../help-page';

@@ -2,7 +2,7 @@ import { HardwareDrawing } from '../../../components/drawing/hardware-drawing';
 import { MountDrawing } from '../../../components/drawing/mount-drawing';
 import { TextLink } from '../../../components/text-link';
 import { asPrinted, askMechanic, stopRiding } from '../cautions';
-import { DrawingSheet } from '../drawing-sheet';
+import { DrawingSheet } from '../../../components/drawing-sheet';
 import { HelpPage } from '../help-page';
 import { Prose } from '../prose';
 

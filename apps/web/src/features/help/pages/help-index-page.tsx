@@ -88,7 +88,8 @@ export function HelpIndexPage() {
         ))}
       </chakra.ul>
       <chakra.p marginTop="8" maxWidth="line">
-        Something else? <TextLink to="/contact">Write to us</TextLink>. Suspension work can injure: if you are
+        Something else? <TextLink to="/contact">Write to us</TextLink>, or ask{' '}
+        <TextLink to="/workshops">a workshop near you</TextLink>. Suspension work can injure: if you are
         unsure, have a qualified mechanic do it.
       </chakra.p>
     </Page>

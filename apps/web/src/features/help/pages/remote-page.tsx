@@ -1,6 +1,6 @@
 import { ShockDrawing } from '../../../components/drawing/shock-drawing';
 import { asPrinted, askMechanic, stopRiding } from '../cautions';
-import { DrawingSheet } from '../drawing-sheet';
+import { DrawingSheet } from '../../../components/drawing-sheet';
 import { withRemote } from '../figures/example-shocks';
 import { HelpPage } from '../help-page';
 import { FigureTable, Prose } from '../prose';

@@ -3,7 +3,7 @@ import { ShockDrawing } from '../../../components/drawing/shock-drawing';
 import { commonSheet } from '../../../components/drawing/sheet';
 import { TextLink } from '../../../components/text-link';
 import { asPrinted, askMechanic } from '../cautions';
-import { DrawingSheet } from '../drawing-sheet';
+import { DrawingSheet } from '../../../components/drawing-sheet';
 import { inlineAir, withReservoir } from '../figures/example-shocks';
 import { HelpPage } from '../help-page';
 import { Prose } from '../prose';

@@ -2,7 +2,7 @@ import { useState } from 'react';
 import { TextLink } from '../../../components/text-link';
 import { formatFigure } from '../../../lib/format-figure';
 import { airOut, coilOff, asPrinted } from '../cautions';
-import { DrawingSheet } from '../drawing-sheet';
+import { DrawingSheet } from '../../../components/drawing-sheet';
 import { rearEndPose, travelMm } from '../figures/rear-end';
 import { RearEndDrawing } from '../figures/rear-end-drawing';
 import { HelpPage } from '../help-page';

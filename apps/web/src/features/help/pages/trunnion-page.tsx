@@ -2,7 +2,7 @@ import { MountDrawing } from '../../../components/drawing/mount-drawing';
 import { ShockDrawing } from '../../../components/drawing/shock-drawing';
 import { TextLink } from '../../../components/text-link';
 import { asPrinted, askMechanic, coilOff, stopRiding } from '../cautions';
-import { DrawingSheet } from '../drawing-sheet';
+import { DrawingSheet } from '../../../components/drawing-sheet';
 import { inlineAir, trunnion } from '../figures/example-shocks';
 import { HelpPage } from '../help-page';
 import { FigureTable, Prose } from '../prose';
