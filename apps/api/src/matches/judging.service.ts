@@ -1,7 +1,9 @@
 import type { WorkId } from '@linkfell/contracts';
 import {
+  isJudged,
   judge,
   judgeAll,
+  screenAll,
   type FitQuestion,
   type Judgement,
   type SheetEntry,
@@ -23,6 +25,15 @@ export interface Judged {
   entry: SheetEntry | null;
 }
 
+/** A catalogue gone through for one measure-up. */
+interface Screened {
+  open: OpenMeasureUp;
+  judged: Judged[];
+  refused: ShockFacts[];
+  /** All that there is to say of refused shocks, for a rider who wants to see them. */
+  judgeRefused: (some: readonly ShockFacts[]) => Judged[];
+}
+
 /** The work to be named to a workshop: putting the shock in, and all that the judgement adds. */
 export const workOf = ({ work }: Judgement): WorkId[] => ['fit-shock', ...work.map(({ id }) => id)];
 
@@ -42,14 +53,23 @@ export class JudgingService {
     private readonly catalogue: CatalogueService,
   ) {}
 
-  async judgeAll(measureUpId: string): Promise<{ open: OpenMeasureUp; judged: Judged[] }> {
+  /** Every size on sale: those that may fit are judged, the many that a cheap check refuses are left for `judgeRefused`. */
+  async screenAll(measureUpId: string): Promise<Screened> {
     const open = await this.ready(measureUpId);
     const { shocks, parts } = await this.catalogue.snapshot();
-    const judgements = judgeAll({ ...open.side, sale: parts }, shocks);
-    return {
-      open,
-      judged: shocks.map((shock, i) => withEntry(open, shock, judgements[i] as Judgement)),
-    };
+    const base = { ...open.side, sale: parts };
+    const judged: Judged[] = [];
+    const refused: ShockFacts[] = [];
+    screenAll(base, shocks).forEach((one, i) => {
+      const shock = shocks[i] as ShockFacts;
+      if (isJudged(one)) judged.push(withEntry(open, shock, one));
+      else refused.push(shock);
+    });
+    const judgeRefused = (some: readonly ShockFacts[]): Judged[] =>
+      some.length === 0
+        ? []
+        : judgeAll(base, some).map((judgement, i) => withEntry(open, some[i] as ShockFacts, judgement));
+    return { open, judged, refused, judgeRefused };
   }
 
   /** @throws CommonException "not-found" for a size that is in no catalogue */

@@ -1,4 +1,5 @@
 import type { MatchDetail, MatchesQuery, MatchesView, MatchRow, Verdict } from '@linkfell/contracts';
+import type { ShockFacts } from '@linkfell/fit-engine';
 import { sagText } from './sag-text.js';
 import { Injectable } from '@nestjs/common';
 import { DataSource } from 'typeorm';
@@ -42,15 +43,19 @@ export class MatchesService {
 
   /** The fitting sheet: every size on sale judged, narrowed by the sentence, grouped by verdict. */
   async matches(measureUpId: string, query: MatchesQuery): Promise<MatchesView> {
-    const { open, judged } = await this.judging.judgeAll(measureUpId);
+    const { open, judged, refused, judgeRefused } = await this.judging.screenAll(measureUpId);
     const applied = appliedTo(open, query);
     const counts = Object.fromEntries(verdictOrder.map((verdict) => [verdict, 0])) as Record<Verdict, number>;
     for (const { judgement } of judged) counts[judgement.verdict] += 1;
+    counts['wont-fit'] += refused.length;
 
-    const wished = judged.filter((one) => wanted(one, applied));
-    const shown = wished.filter(
-      ({ judgement }) => judgement.verdict !== 'wont-fit' || applied.wontFit === 'shown',
+    const mayFit = judged.filter(
+      ({ shock, judgement }) =>
+        wanted(shock, applied) && (judgement.verdict !== 'wont-fit' || applied.wontFit === 'shown'),
     );
+    // Figures of a refused shock are made only for a rider who asks to see them.
+    const asked = applied.wontFit === 'shown' ? refused.filter((shock) => wanted(shock, applied)) : [];
+    const shown = [...mayFit, ...judgeRefused(asked)];
     const priced = shown.filter(({ judgement }) => judgement.verdict !== 'wont-fit');
     const costs = await this.costs.quoteMany(priced.map(requestOf), await this.placeOf(open));
     const rows = shown.map((one) => matchRow(one, costs.get(one.shock.sizeId) ?? noCost));
@@ -67,7 +72,7 @@ export class MatchesService {
       rider: { kg: riderKg(open), sagWindow: sagText(open.side) },
       applied,
       counts,
-      leftOut: judged.length - affordable.length - hiddenRefusals,
+      leftOut: judged.length + refused.length - affordable.length - hiddenRefusals,
       rows: affordable.sort(
         (a, b) =>
           verdictOrder.indexOf(a.verdict) - verdictOrder.indexOf(b.verdict) ||
@@ -111,7 +116,7 @@ function appliedTo(open: OpenMeasureUp, query: MatchesQuery): MatchesView['appli
   };
 }
 
-function wanted({ shock }: Judged, { spring, reservoir }: MatchesView['applied']): boolean {
+function wanted(shock: ShockFacts, { spring, reservoir }: MatchesView['applied']): boolean {
   if (spring !== 'either' && shock.spring.kind !== spring) return false;
   return reservoir === 'either' || (shock.reservoir !== null) === (reservoir === 'with');
 }
