@@ -1,7 +1,6 @@
 import { checkoutView, planView, type CheckoutBody, type PutChoicesBody } from '@linkfell/contracts';
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import { callApiData } from '../../lib/api';
-import { isApiProblem } from '../../lib/api-problem';
 
 export const planQuery = (id: string) =>
   queryOptions({
@@ -12,22 +11,36 @@ export const planQuery = (id: string) =>
     refetchOnWindowFocus: true,
   });
 
-export function useChoices(id: string, revision: number) {
+/**
+ * Keeps a choice. It is seen at once, before the server has worked out what follows from it; several made quickly
+ * are kept one after the other, each on what the one before has left.
+ */
+export function useChoices(id: string) {
   const queries = useQueryClient();
+  const { queryKey } = planQuery(id);
   return useMutation({
+    scope: { id: `plan-${id}` },
     mutationFn: (body: PutChoicesBody) =>
       callApiData(`/plans/${id}/choices`, {
         method: 'PUT',
         body,
-        ifMatch: `"${revision}"`,
+        ifMatch: `"${queries.getQueryData(queryKey)?.revision ?? 0}"`,
         schema: planView,
       }),
-    onSuccess: (view) => queries.setQueryData(planQuery(id).queryKey, view),
-    onError: (error) => {
-      // Another tab changed it: show what is there now.
-      if (isApiProblem(error) && error.status === 412)
-        void queries.invalidateQueries({ queryKey: ['plan', id] });
+    onMutate: async ({ listings, ...rest }) => {
+      await queries.cancelQueries({ queryKey });
+      queries.setQueryData(
+        queryKey,
+        (plan) =>
+          plan && {
+            ...plan,
+            choices: { ...plan.choices, ...rest, listings: { ...plan.choices.listings, ...listings } },
+          },
+      );
     },
+    onSuccess: (view) => queries.setQueryData(queryKey, view),
+    // Another tab changed it, or it was refused: show what is kept now.
+    onError: () => queries.invalidateQueries({ queryKey }),
   });
 }
 

@@ -2,7 +2,7 @@ import { checkoutBody, type PlanView } from '@linkfell/contracts';
 import { standardSchemaResolver } from '@hookform/resolvers/standard-schema';
 import { chakra } from '@chakra-ui/react';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { useState, type ComponentProps } from 'react';
+import { useEffect, useState, type ComponentProps } from 'react';
 import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { Button } from '../../components/button';
@@ -13,6 +13,7 @@ import { TextInput } from '../../components/forms/text-input';
 import { Notice } from '../../components/notice';
 import { TextLink } from '../../components/text-link';
 import { isApiProblem } from '../../lib/api-problem';
+import { applyProblem } from '../../lib/apply-problem';
 import { formatMoneyExact } from '../../lib/format-money';
 import { usePageTitle } from '../../lib/page-title';
 import { checkout } from './api';
@@ -20,6 +21,16 @@ import { checkout } from './api';
 const form = checkoutBody.omit({ totalMinor: true });
 type Form = z.input<typeof form>;
 type ContactName = keyof Form['contact'];
+
+const fields = [
+  'contact.name',
+  'contact.email',
+  'contact.phone',
+  'contact.street',
+  'contact.town',
+  'contact.postcode',
+  'acceptTerms',
+] as const;
 
 const inputs: readonly { name: ContactName; label: string; hint?: string; input: ComponentProps<'input'> }[] =
   [
@@ -36,12 +47,29 @@ const inputs: readonly { name: ContactName; label: string; hint?: string; input:
     { name: 'postcode', label: 'Postcode', input: { autoComplete: 'postal-code' } },
   ];
 
-/** Contact and terms on one page, seven fields; then the payment page. No account is needed. */
-export function CheckoutForm({ plan }: { plan: PlanView }) {
+/** The server's own words stand where they were said; the schema's about a box that is not ticked are ours. */
+const termsFault = ({ type, message }: { type?: string; message?: string }): string =>
+  type === 'server' && message ? message : 'Tick the box to accept the terms';
+
+/**
+ * Contact and terms on one page, seven fields; then the payment page. No account is needed. The fields stay while
+ * the plan is not ready to be paid, so that nothing typed is lost when somebody else was quicker.
+ */
+export function CheckoutForm({
+  plan,
+  ready,
+  keeping,
+}: {
+  plan: PlanView;
+  ready: boolean;
+  /** A choice is on its way to the server: what would be paid is not known yet. */
+  keeping: boolean;
+}) {
   const queries = useQueryClient();
   const [attempt, setAttempt] = useState(0);
-  const [key] = useState(() => crypto.randomUUID());
-  const { register, handleSubmit, formState, getValues } = useForm<Form>({
+  // One key for one try: a press repeated on a bad line finds the first answer, a try after a refusal is new.
+  const [key, setKey] = useState(() => crypto.randomUUID());
+  const { register, handleSubmit, formState, getValues, setError } = useForm<Form>({
     resolver: standardSchemaResolver(form),
     shouldFocusError: false,
     defaultValues: { contact: { name: '', email: '', phone: '', street: '', town: '', postcode: '' } },
@@ -54,15 +82,25 @@ export function CheckoutForm({ plan }: { plan: PlanView }) {
         form
           .and(checkoutBody.pick({ totalMinor: true }))
           .parse({ ...getValues(), totalMinor: plan.totalMinor }),
-        `${key}-${plan.totalMinor}-${plan.revision}-${pay0.current}`,
+        `${key}-${plan.totalMinor}-${plan.revision}`,
       ),
     onSuccess: ({ paymentUrl }) => window.location.assign(paymentUrl),
-    onError: () => {
-      pay0.current += 1;
+    onError: (error) => {
+      if (isApiProblem(error)) setKey(crypto.randomUUID());
+      if (isApiProblem(error) && error.errors.length > 0) {
+        applyProblem(error, setError, { fields, otherwise: 'acceptTerms' });
+        setAttempt((count) => count + 1);
+      }
       void queries.invalidateQueries({ queryKey: ['plan', plan.id] });
     },
   });
-  const [pay0] = useState(() => ({ current: 0 }));
+  const { reset } = pay;
+  useEffect(() => {
+    // Back from the payment page the browser may show this page as it was left: busy.
+    const shown = ({ persisted }: PageTransitionEvent) => persisted && reset();
+    window.addEventListener('pageshow', shown);
+    return () => window.removeEventListener('pageshow', shown);
+  }, [reset]);
   const { errors } = formState;
   const faults = [
     ...inputs.flatMap(({ name }) => {
@@ -70,7 +108,7 @@ export function CheckoutForm({ plan }: { plan: PlanView }) {
       return message ? [{ fieldId: name, message }] : [];
     }),
     ...(errors.acceptTerms?.message
-      ? [{ fieldId: 'acceptTerms', message: 'Tick the box to accept the terms' }]
+      ? [{ fieldId: 'acceptTerms', message: termsFault(errors.acceptTerms) }]
       : []),
   ];
   usePageTitle(`Plan: ${plan.shock.modelName}`, { error: faults.length > 0 });
@@ -80,7 +118,7 @@ export function CheckoutForm({ plan }: { plan: PlanView }) {
       maxWidth="form"
       onSubmit={(event) =>
         void handleSubmit(
-          () => pay.mutate(),
+          () => keeping || pay.isPending || pay.mutate(),
           () => setAttempt((count) => count + 1),
         )(event)
       }
@@ -93,7 +131,7 @@ export function CheckoutForm({ plan }: { plan: PlanView }) {
       ))}
       <Checkbox
         id="acceptTerms"
-        error={errors.acceptTerms ? 'Tick the box to accept the terms' : undefined}
+        error={errors.acceptTerms ? termsFault(errors.acceptTerms) : undefined}
         label={
           <>
             I accept the <TextLink to="/terms">terms</TextLink> and have read the cautions above
@@ -101,7 +139,7 @@ export function CheckoutForm({ plan }: { plan: PlanView }) {
         }
         {...register('acceptTerms')}
       />
-      {pay.error ? (
+      {pay.error && faults.length === 0 ? (
         <chakra.div marginBottom="4">
           <Notice
             tone="brick"
@@ -116,14 +154,18 @@ export function CheckoutForm({ plan }: { plan: PlanView }) {
           </Notice>
         </chakra.div>
       ) : null}
-      <Button
-        type="submit"
-        size="large"
-        wide="yes"
-        busy={(pay.isPending || pay.isSuccess) && 'Holding stock and date'}
-      >
-        Pay {formatMoneyExact(plan.totalMinor)}
-      </Button>
+      {ready ? (
+        <Button
+          type="submit"
+          size="large"
+          wide="yes"
+          busy={
+            keeping ? 'Keeping your choice' : (pay.isPending || pay.isSuccess) && 'Holding stock and date'
+          }
+        >
+          Pay {formatMoneyExact(plan.totalMinor)}
+        </Button>
+      ) : null}
       <chakra.p color="slate" fontSize="sm" marginTop="3">
         Stock and date are held for you while you pay on our payment provider’s page.
       </chakra.p>

@@ -50,7 +50,7 @@ export function PlanPage() {
 }
 
 function Plan({ plan }: { plan: PlanView }) {
-  const choose = useChoices(plan.id, plan.revision);
+  const choose = useChoices(plan.id);
   const { shock, choices } = plan;
   const name = `${shock.makerName} ${shock.modelName} ${shock.sizeKey}`;
   const fixable = plan.missing.filter(({ code }) => code !== 'choose-slot');
@@ -183,21 +183,22 @@ function Plan({ plan }: { plan: PlanView }) {
       <Section>
         <Title>Pay</Title>
         {plan.missing.length > 0 ? (
-          <Notice tone="heather" title="Before you can pay" announce="status">
-            <chakra.ul paddingLeft="5" listStyleType="disc">
-              {plan.missing.map(({ code, say }) => (
-                <li key={code}>{say}</li>
-              ))}
-            </chakra.ul>
-            {fixable.some(({ code }) => code === 'not-judged-fit') ? (
-              <LinkButton tone="plain" to={`/measure-up/${plan.measureUpId}/matches/${shock.sizeId}`}>
-                See what is not known
-              </LinkButton>
-            ) : null}
-          </Notice>
-        ) : (
-          <CheckoutForm plan={plan} />
-        )}
+          <chakra.div marginBottom="6" maxWidth="form">
+            <Notice tone="heather" title="Before you can pay" announce="status">
+              <chakra.ul paddingLeft="5" listStyleType="disc">
+                {plan.missing.map(({ code, say }) => (
+                  <li key={code}>{say}</li>
+                ))}
+              </chakra.ul>
+              {fixable.some(({ code }) => code === 'not-judged-fit') ? (
+                <LinkButton tone="plain" to={`/measure-up/${plan.measureUpId}/matches/${shock.sizeId}`}>
+                  See what is not known
+                </LinkButton>
+              ) : null}
+            </Notice>
+          </chakra.div>
+        ) : null}
+        <CheckoutForm plan={plan} ready={plan.missing.length === 0} keeping={choose.isPending} />
       </Section>
     </Page>
   );
