@@ -58,7 +58,8 @@ for (const path of pages) {
       width: document.documentElement.scrollWidth,
       // Links in running text are exempt (WCAG 2.2, 2.5.8); the skip link is out of sight until it has the focus.
       small: [...document.querySelectorAll('header a, header label, footer a, button, main a[class]')]
-        .filter((element) => getComputedStyle(element).display !== 'inline')
+        // What is not shown at this width is no target.
+        .filter((element) => element.checkVisibility() && getComputedStyle(element).display !== 'inline')
         .filter((element) => element.getBoundingClientRect().height < 44)
         .map((element) => element.textContent),
       shifted: (window as unknown as { shifted: number }).shifted,
