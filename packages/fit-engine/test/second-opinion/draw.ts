@@ -17,7 +17,20 @@ const seen = (r: Random) => ({
 
 /** One disturbance per check: something that this check, and where it can be only this one, has to answer. */
 const disturb: Record<CheckId, Draw> = {
-  'eye-to-eye': (q, r) => set(q, 'shock.sizeKey', r.pick(['185x55', '185x52.5', '230x60'])),
+  'eye-to-eye': (q, r) => {
+    // Two lengths that share their strokes leave nothing but the length to object.
+    const pair = r.pick([
+      ['210x55', '185x55'],
+      ['210x52.5', '185x52.5'],
+      ['190x45', '165x45'],
+      ['230x60', '205x60'],
+      ['210x55', '185x52.5'],
+      ['210x55', '230x60'],
+    ] as const);
+    const [own, theirs] = r.chance(0.5) ? pair : [pair[1], pair[0]];
+    const sized = q.frame.entries[0]?.sizeKey === '210x55' ? set(q, 'frame.entries.0.sizeKey', own) : q;
+    return set(sized, 'shock.sizeKey', theirs);
+  },
   stroke: (q, r) =>
     set(
       set(q, 'shock.sizeKey', r.pick(['210x52.5', '210x50', '210x55'])),
@@ -158,12 +171,18 @@ const disturb: Record<CheckId, Draw> = {
   },
 };
 
+const checks = Object.keys(disturb) as CheckId[];
+
+/** A question that fits, perhaps with one thing changed around it, and then one check disturbed and no other. */
+export function drawBroken(check: CheckId): (r: Random) => FitQuestion {
+  return (r) => disturb[check](r.chance(0.3) ? r.pick(around)(matching, r) : matching, r);
+}
+
 /** A matching question with up to two changes around it and up to two disturbances. */
 export function drawQuestion(r: Random): FitQuestion {
   let q = matching;
   const changes = r.pick([0, 0, 1, 1, 2]);
   for (let i = 0; i < changes; i += 1) q = r.pick(around)(q, r);
-  const checks = Object.keys(disturb) as CheckId[];
   const times = r.pick([0, 1, 1, 1, 2]);
   for (let i = 0; i < times; i += 1) q = disturb[r.pick(checks)](q, r);
   return q;
