@@ -1,4 +1,5 @@
 import type { FrameOutline, FrameRoom, Point } from '../facts.js';
+import type { Corners } from './polygon-distance.js';
 
 /** Where a rigid outline is at a shock travel: turned about its origin, then shifted. */
 export interface Pose {
@@ -21,18 +22,22 @@ export interface SweptShock {
   wayRound: 'body-to-frame' | 'body-to-link';
 }
 
+/** The first row of a table at or after a travel, or its last. */
+function rowAt(table: readonly (readonly number[])[], travel: number): number {
+  let row = 0;
+  while (row < table.length - 1 && !((table[row]?.[0] ?? NaN) >= travel)) row += 1;
+  return row;
+}
+
 /** Linear between rows of [travel, value...]; held at the ends. */
-function between(table: readonly (readonly number[])[], travel: number, column: number): number {
-  const last = table.length - 1;
-  const value = (row: number, of: number): number => table[row]?.[of] ?? NaN;
-  if (travel <= value(0, 0)) return value(0, column);
-  for (let row = 1; row <= last; row += 1) {
-    if (value(row, 0) >= travel) {
-      const t = (travel - value(row - 1, 0)) / (value(row, 0) - value(row - 1, 0));
-      return value(row - 1, column) + t * (value(row, column) - value(row - 1, column));
-    }
-  }
-  return value(last, column);
+function between(table: readonly (readonly number[])[], row: number, travel: number, column: number): number {
+  const [to, from] = [table[row], table[row - 1]];
+  const value = to?.[column] ?? NaN;
+  const end = to?.[0] ?? NaN;
+  if (!from || travel >= end) return value;
+  const start = from[0] ?? NaN;
+  const t = (travel - start) / (end - start);
+  return (from[column] ?? NaN) + t * (value - (from[column] ?? NaN));
 }
 
 const reachOf = (outline: readonly Point[]): number =>
@@ -47,7 +52,7 @@ export function shockMover(room: FrameRoom, shock: SweptShock): Mover {
     outline,
     reachMm: reachOf(outline),
     poseAt(travel) {
-      const deg = between(room.swing, travel, 1);
+      const deg = between(room.swing, rowAt(room.swing, travel), travel, 1);
       const out = atFrame ? 0 : shock.eyeToEyeMm - travel;
       const rad = (deg * Math.PI) / 180;
       return { x: out * Math.cos(rad), y: out * Math.sin(rad), deg };
@@ -61,10 +66,12 @@ export function partMover({ polygon, poses }: FrameOutline): Mover {
   return {
     outline: polygon,
     reachMm: reachOf(polygon),
-    poseAt: (travel) =>
-      poses
-        ? { x: between(poses, travel, 1), y: between(poses, travel, 2), deg: between(poses, travel, 3) }
-        : still,
+    poseAt(travel) {
+      if (!poses) return still;
+      const row = rowAt(poses, travel);
+      const at = (column: number): number => between(poses, row, travel, column);
+      return { x: at(1), y: at(2), deg: at(3) };
+    },
   };
 }
 
@@ -74,13 +81,29 @@ export function placed({ outline }: Mover, { x, y, deg }: Pose): readonly Point[
   return outline.map(([px, py]): Point => [c * px - s * py + x, s * px + c * py + y]);
 }
 
+/** The same from corners into corners, so that nothing is allocated. */
+export function placeCorners(from: Corners, { x, y, deg }: Pose, into: Corners): void {
+  const turn = (deg * Math.PI) / 180;
+  const c = Math.cos(turn);
+  const s = Math.sin(turn);
+  for (let i = 0; i < from.length; i += 2) {
+    const px = from[i] as number;
+    const py = from[i + 1] as number;
+    into[i] = c * px - s * py + x;
+    into[i + 1] = s * px + c * py + y;
+  }
+}
+
 /**
  * The longest way that any point of an outline can go between two poses, mm: the arc at its reach plus the shift of
  * its origin. The origin itself runs along a line, or, at the shock's far end, along an arc that the angle bounds.
  */
 export function longestWay({ reachMm }: Mover, from: Pose, to: Pose): number {
+  if (from === to) return 0;
   const turn = (Math.abs(to.deg - from.deg) * Math.PI) / 180;
-  const radial = Math.abs(Math.hypot(to.x, to.y) - Math.hypot(from.x, from.y));
-  const arc = turn * Math.max(Math.hypot(to.x, to.y), Math.hypot(from.x, from.y));
-  return turn * reachMm + Math.max(Math.hypot(to.x - from.x, to.y - from.y), radial + arc);
+  const [near, far] = [lengthOf(from.x, from.y), lengthOf(to.x, to.y)];
+  const arc = turn * Math.max(far, near);
+  return turn * reachMm + Math.max(lengthOf(to.x - from.x, to.y - from.y), Math.abs(far - near) + arc);
 }
+
+const lengthOf = (x: number, y: number): number => Math.sqrt(x * x + y * y);

@@ -1,6 +1,8 @@
-import type { FrameOutline, FrameRoom } from '../facts.js';
-import { partMover, shockMover, type SweptShock } from './motion.js';
-import { nearest, type Nearest } from './nearest.js';
+import type { FrameRoom } from '../facts.js';
+import { drawnRoom, finite } from './drawn-room.js';
+import { shockMover, type SweptShock } from './motion.js';
+import { begin, nearest, type Nearest } from './nearest.js';
+import { cornersOf } from './polygon-distance.js';
 
 export type { SweptShock } from './motion.js';
 
@@ -15,62 +17,41 @@ export interface SweepResult {
   movementNotDrawn: boolean;
 }
 
-const finite = (rows: readonly (readonly number[])[]): boolean =>
-  rows.every((row) => row.every((value) => Number.isFinite(value)));
-const rising = (rows: readonly (readonly number[])[]): boolean =>
-  rows.every((row, i) => i === 0 || (row[0] ?? NaN) > (rows[i - 1]?.[0] ?? NaN));
-/** A table that can be read from 0 to the stroke; half a millimetre short is read as held. */
-const covers = (rows: readonly (readonly number[])[], strokeMm: number): boolean =>
-  rows.length > 0 &&
-  finite(rows) &&
-  rising(rows) &&
-  (rows[0]?.[0] ?? NaN) <= 0 &&
-  (rows.at(-1)?.[0] ?? NaN) >= strokeMm - 0.5;
-
-const drawn = (part: FrameOutline, strokeMm: number): boolean =>
-  part.polygon.length >= 3 &&
-  finite(part.polygon) &&
-  part.toleranceMm >= 0 &&
-  Number.isFinite(part.toleranceMm) &&
-  (part.poses ? covers(part.poses, strokeMm) : !part.moves);
-
-/** Both ends of the stroke and every row of a table, since motion bends there. */
-function bendsOf(room: FrameRoom, parts: readonly FrameOutline[], strokeMm: number): number[] {
-  const rows = [room.swing, ...parts.map(({ poses }) => poses ?? [])].flatMap((table) =>
-    table.map((row) => row[0] ?? 0),
-  );
-  return [...new Set([0, strokeMm, ...rows.filter((s) => s > 0 && s < strokeMm)])].sort((p, q) => p - q);
-}
-
 /**
  * The least distance of the shock's body to the frame's parts over the stroke, mm: steps of at most 0.5 mm wherever
  * something nearer might hide, finer where it is least, less what a step can hide and less each part's stated tolerance; never below 0. A moving part
  * without a pose table that spans the stroke, or an outline or swing that cannot be used, makes it incomplete.
+ * @param floorMm above 0: a distance of this or less is of no interest; it is given as first seen, perhaps without
+ *   part and travel
  */
-export function sweep(room: FrameRoom, shock: SweptShock): SweepResult {
-  const { strokeMm, eyeToEyeMm, body } = shock;
-  const movementNotDrawn = room.outlines.some(
-    ({ moves, poses }) => (moves || poses) && !(poses && covers(poses, strokeMm)),
-  );
+export function sweep(room: FrameRoom, shock: SweptShock, floorMm = 0): SweepResult {
+  const { strokeMm, eyeToEyeMm } = shock;
+  const { parts, left, swingDrawn, movementNotDrawn } = drawnRoom(room, strokeMm);
   const nothing = { distanceMm: null, atShockTravelMm: 0, part: '', movementNotDrawn };
-  const usable = body.length >= 3 && finite(body) && strokeMm > 0 && eyeToEyeMm > strokeMm;
+  const usable = shock.body.length >= 3 && finite(shock.body) && strokeMm > 0 && eyeToEyeMm > strokeMm;
   if (!usable) return { ...nothing, incomplete: 'shock' };
-  if (!covers(room.swing, strokeMm)) return { ...nothing, incomplete: 'swing' };
-  const parts = room.outlines.filter((part) => drawn(part, strokeMm));
-  const left = room.outlines.find((part) => !drawn(part, strokeMm));
+  if (!swingDrawn) return { ...nothing, incomplete: 'swing' };
   const mover = shockMover(room, shock);
-  let least: (Nearest & { part: string }) | null = null;
-  for (const part of parts) {
-    const bends = bendsOf(room, [part], strokeMm);
-    const found = nearest(mover, partMover(part), bends, part.toleranceMm, least?.mm);
-    if (!least || found.mm < least.mm) least = { ...found, part: part.name };
+  const body = { mover, corners: cornersOf(mover.outline) };
+  const begun = parts.map((part) => ({ part, looks: begin(body, part, strokeMm, part.toleranceMm) }));
+  // Parts that stay further away all along than what is seen at the ends of the stroke need no closer look.
+  const seenMm = Math.min(...begun.map(({ looks: { atEnds } }) => Math.min(atEnds[0].free, atEnds[1].free)));
+  if (floorMm > 0 && seenMm <= floorMm) {
+    return { distanceMm: seenMm, atShockTravelMm: 0, part: '', incomplete: left, movementNotDrawn };
   }
-  if (!least) return { ...nothing, incomplete: left?.name ?? 'outlines' };
+  let least: (Nearest & { part: string }) | null = null;
+  for (const { part, looks } of begun) {
+    const beatMm = Math.min(least?.mm ?? Infinity, seenMm);
+    const found = nearest(body, part, part.bends, looks, { beatMm, floorMm });
+    if (!least || found.mm < least.mm) least = { ...found, part: part.name };
+    if (least.mm <= floorMm) break;
+  }
+  if (!least) return { ...nothing, incomplete: left ?? 'outlines' };
   return {
     distanceMm: least.mm,
     atShockTravelMm: least.at,
     part: least.part,
-    incomplete: left?.name ?? null,
+    incomplete: left,
     movementNotDrawn,
   };
 }

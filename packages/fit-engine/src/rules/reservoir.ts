@@ -62,10 +62,14 @@ function byDrawing(
   const size = sizeOf(trial.entry.sizeKey ?? trial.shock.sizeKey);
   const { room, reservoirStatement: word } = trial.frame;
   if (!room || !size) return null;
+  // A position is looked at only as closely as it takes to know that another one has more room.
+  let floorMm = 0;
   const results = positions.map((positionDeg) => {
     const body = reservoir.outlines.find((outline) => outline.positionDeg === positionDeg)?.polygon ?? [];
     const { eyeToEyeMm, strokeMm } = size;
-    return { positionDeg, result: sweep(room, { body, eyeToEyeMm, strokeMm, wayRound: trial.wayRound }) };
+    const result = sweep(room, { body, eyeToEyeMm, strokeMm, wayRound: trial.wayRound }, floorMm);
+    floorMm = Math.max(floorMm, result.distanceMm ?? 0);
+    return { positionDeg, result };
   });
   const judged = results.filter((one): one is Swept => one.result.distanceMm !== null);
   const [first, ...others] = judged;
