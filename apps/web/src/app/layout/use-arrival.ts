@@ -20,6 +20,25 @@ export function useArrival(): void {
   useEffect(() => {
     if (known.current === pathname) return;
     known.current = pathname;
-    document.querySelector<HTMLElement>('[data-page-heading]')?.focus({ preventScroll: true });
+    return focusHeading();
   }, [pathname]);
+}
+
+/**
+ * Focuses the heading of the page, also one that comes only with the page's data, or that takes the place of the one
+ * focused before; until the reader has gone somewhere else.
+ * @returns ends the waiting
+ */
+function focusHeading(): () => void {
+  const onHeading = () => document.activeElement?.matches('[data-page-heading]') ?? false;
+  const settle = () =>
+    document.querySelector<HTMLElement>('[data-page-heading]')?.focus({ preventScroll: true });
+  const waiting = new MutationObserver(() => {
+    if (onHeading()) return;
+    if (document.activeElement === document.body) settle();
+    else waiting.disconnect();
+  });
+  settle();
+  waiting.observe(document.querySelector('#main') ?? document.body, { childList: true, subtree: true });
+  return () => waiting.disconnect();
 }

@@ -22,9 +22,13 @@ function goTo(fieldId: string): void {
 /** On top of a form that was sent with faults: says how many, links to each. Shows nothing while all is well. */
 export function ErrorSummary({ faults, attempt }: ErrorSummaryProps) {
   const box = useRef<HTMLDivElement>(null);
+  const served = useRef(0);
   useEffect(() => {
-    if (attempt > 0) box.current?.focus();
-  }, [attempt]);
+    // The faults may come a render later than the attempt: the box is waited for.
+    if (attempt === served.current || !box.current) return;
+    served.current = attempt;
+    box.current.focus();
+  });
   if (faults.length === 0) return null;
   const title =
     faults.length === 1 ? 'One answer needs another look' : `${faults.length} answers need another look`;
