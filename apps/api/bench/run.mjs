@@ -4,8 +4,6 @@ import { randomBytes } from 'node:crypto';
 import { createServer } from 'node:net';
 import { fileURLToPath } from 'node:url';
 
-import { readScenario } from '@linkfell/db';
-import { judgeAll, nPerMmPerLbPerIn } from '@linkfell/fit-engine';
 import pg from 'pg';
 
 const needed = (name) => {
@@ -15,77 +13,6 @@ const needed = (name) => {
 };
 const quantile = (list, q) =>
   [...list].sort((a, b) => a - b)[Math.min(list.length - 1, Math.floor(list.length * q))];
-
-/** The engine alone: one bike against 5,000 sizes, made by repeating the catalogue. */
-function benchEngine() {
-  const scenario = readScenario();
-  const frame = scenario.frames.find(({ id }) => id === 'ullscar-withen-140');
-  const shocks = Array.from({ length: 5000 }, (_, i) => {
-    const size = scenario.shockSizes[i % scenario.shockSizes.length];
-    return {
-      ...size.facts,
-      sizeId: `${size.id}-${i}`,
-      sizeKey: size.sizeKey,
-      modelName: size.name,
-      makerName: '',
-    };
-  });
-  const base = {
-    frame: {
-      ...frame.sheet.facts,
-      origin: 'sheet',
-      id: frame.id,
-      name: frame.model,
-      sheetVersion: 1,
-      entries: frame.sheet.entries,
-    },
-    present: Object.fromEntries(
-      [
-        'printedSizeKey',
-        'eyeToEye',
-        'compressed',
-        'shaftTravel',
-        'bodyEndKind',
-        'shaftEndKind',
-        'frameEndHardware',
-        'linkEndHardware',
-        'diameterMm',
-        'spring',
-        'remoteAction',
-        'remoteLine',
-        'soldWithBike',
-      ].map((key) => [key, null]),
-    ),
-    rider: {
-      riderKg: 80,
-      kitKg: 3,
-      bikeKg: 14.5,
-      style: 'trail',
-      modelYear: 2024,
-      frameSize: null,
-      chip: null,
-      springWish: 'either',
-      reservoirWish: 'either',
-      wantsRemote: false,
-      acceptsExternalRouting: null,
-      confirmsSheetSize: false,
-      fillingHeightM: 200,
-    },
-    sale: {
-      kits: scenario.kits,
-      coils: scenario.coils.map((coil) => ({ ...coil, rateNPerMm: coil.rateLbPerIn * nPerMmPerLbPerIn })),
-      remotes: scenario.remotes,
-      otherPartIds: scenario.holdOpenParts.map(({ id }) => id),
-    },
-  };
-  judgeAll(base, shocks.slice(0, 500));
-  const times = Array.from({ length: 5 }, () => {
-    const start = performance.now();
-    judgeAll(base, shocks);
-    return performance.now() - start;
-  });
-  console.log(`engine: one bike against 5,000 sizes, median of 5: ${quantile(times, 0.5).toFixed(0)} ms`);
-}
 
 const freePort = () =>
   new Promise((resolve) => {
@@ -166,7 +93,6 @@ async function benchApi(url, pid) {
 }
 
 async function main() {
-  benchEngine();
   const admin = needed('TEST_DATABASE_ADMIN_URL');
   const name = `linkfell_bench_${randomBytes(4).toString('hex')}`;
   const client = new pg.Client({ connectionString: admin });

@@ -19,14 +19,21 @@ export function airSagTable() {
     for (let gaugeKPa = 700; gaugeKPa <= 1700; gaugeKPa += 100) rows.push({ loadN, gaugeKPa });
   }
   const { curve } = makeCurve(table, travelMm, strokeMm);
-  const solve = () => rows.map(({ loadN, gaugeKPa }) => sagForFill(chambers, curve, loadN, gaugeKPa, patmKPa));
+  const solve = () =>
+    rows.map(({ loadN, gaugeKPa }) => sagForFill(chambers, curve, loadN, gaugeKPa, patmKPa));
   const solved = solve();
   const { medianMs, leastMs } = timed(60, solve);
   const us = (ms) => (1000 * ms) / rows.length;
-  console.log(`air sag, ${rows.length} solutions: median ${us(medianMs).toFixed(2)} µs each, least ${us(leastMs).toFixed(2)} µs`);
-  const byWheel = makeCurve(wheelTable(curve), travelMm, strokeMm).curve;
-  const slow = timed(5, () => rows.map(({ loadN, gaugeKPa }) => sagForFill(chambers, byWheel, loadN, gaugeKPa, patmKPa)));
-  console.log(`  with leverage by wheel travel, integrated and inverted at each step: median ${us(slow.medianMs).toFixed(1)} µs`);
+  console.log(
+    `air sag, ${rows.length} solutions: median ${us(medianMs).toFixed(2)} µs each, least ${us(leastMs).toFixed(2)} µs`,
+  );
+  const byWheel = makeCurve(wheelTable(curve), curve.totalTravelMm, strokeMm).curve;
+  const slow = timed(5, () =>
+    rows.map(({ loadN, gaugeKPa }) => sagForFill(chambers, byWheel, loadN, gaugeKPa, patmKPa)),
+  );
+  console.log(
+    `  with leverage by wheel travel, integrated and inverted at each step: median ${us(slow.medianMs).toFixed(1)} µs`,
+  );
   return { rows, solved, medianUs: us(medianMs) };
 }
 
@@ -44,13 +51,19 @@ export function benchScipy({ rows, solved, medianUs }) {
     timeout: 120_000,
   });
   if (python.error || python.status !== 0) {
-    const why = python.error ? 'there is no python3 here' : (python.stderr.trim().split('\n').at(-1) ?? 'it failed');
+    const why = python.error
+      ? 'there is no python3 here'
+      : (python.stderr.trim().split('\n').at(-1) ?? 'it failed');
     console.log(`air sag in SciPy: not compared (${why})`);
     return;
   }
   const { version, sagMm, usEach } = JSON.parse(python.stdout);
   const apart = solved.map((state, i) =>
-    state.state === 'ok' && sagMm[i] !== null ? Math.abs(state.sagMm - sagMm[i]) : state.state === 'ok' || sagMm[i] !== null ? Infinity : 0,
+    state.state === 'ok' && sagMm[i] !== null
+      ? Math.abs(state.sagMm - sagMm[i])
+      : state.state === 'ok' || sagMm[i] !== null
+        ? Infinity
+        : 0,
   );
   console.log(
     `air sag in SciPy ${version}: ${usEach.toFixed(1)} µs each, ${(usEach / medianUs).toFixed(0)} times as long; ` +

@@ -24,21 +24,45 @@ function benchCatalogue() {
   );
   const whole = timed(60, () => screenAll(bike, shocks));
   report('the whole catalogue, sweeps included', whole, 'ms');
-  report('  refused ones alone', timed(60, () => screenAll(bike, refused)), 'ms');
-  report('  inline ones that may fit', timed(60, () => screenAll(bike, inline)), 'ms');
-  report('  reservoirs that may fit, swept in both positions', timed(60, () => screenAll(bike, cans)), 'ms');
-  report('  the bike alone', timed(60, () => screenAll(bike, [])), 'ms');
-  report('every size with all its figures (judgeAll)', timed(15, () => judgeAll(bike, shocks)), 'ms');
+  report(
+    '  refused ones alone',
+    timed(60, () => screenAll(bike, refused)),
+    'ms',
+  );
+  report(
+    '  inline ones that may fit',
+    timed(60, () => screenAll(bike, inline)),
+    'ms',
+  );
+  report(
+    '  reservoirs that may fit, swept in both positions',
+    timed(60, () => screenAll(bike, cans)),
+    'ms',
+  );
+  report(
+    '  the bike alone',
+    timed(60, () => screenAll(bike, [])),
+    'ms',
+  );
+  report(
+    'every size with all its figures (judgeAll)',
+    timed(15, () => judgeAll(bike, shocks)),
+    'ms',
+  );
   const kB = (bytes) => (bytes / 1024).toFixed(0);
   console.log(`  allocated: ${kB(allocatedBy(() => screenAll(bike, shocks)))} kB for the whole catalogue`);
 
   // Sixteen checks, or fifteen without the reservoir, in each entry both ways round.
   const answers = shocks.length * 15 * bike.frame.entries.length * 2;
-  console.log(`  ${perSecond(answers, whole.medianMs)} checks per second and core, gone through by their codes`);
+  console.log(
+    `  ${perSecond(answers, whole.medianMs)} checks per second and core, gone through by their codes`,
+  );
   const some = shocks.filter((_, i) => i % 25 === 0);
   const full = timed(30, () => some.forEach((shock) => judge({ ...bike, shock }, { full: true })));
   const told = some.length * 16 * bike.frame.entries.length * 2;
-  console.log(`  ${perSecond(told, full.medianMs)} checks per second and core, one shock at a time with all figures`);
+  console.log(
+    `  ${perSecond(told, full.medianMs)} checks per second and core, one shock at a time with all figures`,
+  );
 }
 
 const perSecond = (count, ms) => Math.round((1000 * count) / ms).toLocaleString('en-GB');
