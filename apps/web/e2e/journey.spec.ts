@@ -146,24 +146,3 @@ test('answers survive a reload, Back and another browser through the rider’s o
   await expect(other.getByText('80 kg, kit 3 kg')).toBeVisible();
   await other.context().close();
 });
-
-test('wrong input is told at its field, and nothing typed is lost', async ({ page }) => {
-  await page.goto('/measure-up');
-  await page.getByRole('button', { name: 'Start', exact: true }).click();
-  await page.getByLabel('Maker, model or year').fill('Withen');
-  await page.getByRole('radio', { name: /Withen 140,/ }).check();
-  await page.getByRole('button', { name: 'Continue' }).click();
-  await page.getByLabel('Size as printed').fill('212x99');
-  await page.getByRole('button', { name: 'Continue' }).click();
-  await expect(page.getByRole('alert')).toContainText('A size looks like');
-  await expect(page).toHaveTitle(/^Error:/);
-  await expect(page.getByLabel('Size as printed')).toHaveValue('212x99');
-  await page.getByRole('button', { name: 'I don’t know' }).click();
-  await page.getByLabel('Eye-to-eye').fill('20 metres');
-  await page.getByRole('button', { name: 'Continue' }).click();
-  await expect(page.getByRole('alert')).toBeVisible();
-  await expect(page.getByLabel('Eye-to-eye')).toHaveValue('20 metres');
-  await page.getByLabel('Eye-to-eye').fill('999');
-  await page.getByRole('button', { name: 'Continue' }).click();
-  await expect(page.getByRole('alert')).toContainText('longer than any');
-});

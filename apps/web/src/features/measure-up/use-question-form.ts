@@ -45,6 +45,7 @@ export function useQuestionForm(
         message: plain(
           message,
           fields.find((field) => field.name === name),
+          raw[name],
         ),
       };
     }
@@ -81,11 +82,15 @@ export function useQuestionForm(
   };
 }
 
-/** The library's own words say nothing to a rider: a choice that was not made is said as such. */
-function plain(message: string, field: FieldSpec | undefined): string {
-  if (!/^Invalid|^Expected|discriminator/i.test(message)) return message;
+/** A schema's own words may say nothing to a rider: what was not chosen or cannot be read is said as such. */
+function plain(message: string, field: FieldSpec | undefined, typed = ''): string {
   if (field?.type === 'choice') return `Choose one: ${field.label.toLowerCase()}`;
   if (field?.type === 'select' || field?.type === 'town') return 'Choose one from the list';
-  if (field?.name === 'text') return 'A size looks like 210x55 or 7.875 x 2.25';
-  return `Enter a figure for ${field ? field.label.toLowerCase() : 'this'}`;
+  if (field?.name === 'frameId') return 'Choose your frame from the list, or say that it is not listed';
+  if (message === 'Enter a figure' || /^Invalid|^Expected|discriminator/i.test(message)) {
+    if (field?.name === 'text') return 'A size looks like 210x55 or 7.875 x 2.25';
+    if (typed.trim()) return `“${typed.trim()}” cannot be read as a figure`;
+    return `Enter a figure: ${field ? field.label.toLowerCase() : 'this one'}`;
+  }
+  return message;
 }
