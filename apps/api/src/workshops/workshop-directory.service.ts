@@ -37,7 +37,7 @@ const sql = `
             FROM workshop_closures c
            WHERE c.organisation_id = o.id AND c.last_day >= ($1::timestamptz AT TIME ZONE o.time_zone)::date) AS closures,
          (SELECT coalesce(json_agg(json_build_object('workId', work_id, 'minutes', minutes, 'priceMinor', price_minor)
-                   ORDER BY price_minor DESC, work_id), '[]')
+                   ORDER BY work_id <> 'fit-shock', price_minor DESC, work_id), '[]')
             FROM workshop_services v WHERE v.organisation_id = o.id) AS services
     FROM organisations o JOIN towns t ON t.id = o.town_id
    WHERE o.is_workshop AND ($2::text IS NULL OR o.id = $2)

@@ -8,11 +8,14 @@ export function LoadFailed({
   error,
   what,
   next = { to: '/', label: 'To the front page' },
+  gone = `There are no such things here, or this browser has not opened ${what} before.`,
 }: {
   error: Error;
   what: string;
   /** Where the reader can go on. */
   next?: { to: string; label: string };
+  /** What may be the matter where nothing is at this address. */
+  gone?: string;
 }) {
   const missing = isApiProblem(error) && error.status === 404;
   return (
@@ -20,7 +23,7 @@ export function LoadFailed({
       <PageHeading
         lead={
           missing
-            ? `There are no such things here, or this browser has not opened ${what} before.`
+            ? gone
             : isApiProblem(error)
               ? (error.detail ?? error.title)
               : 'Something went wrong on our side.'

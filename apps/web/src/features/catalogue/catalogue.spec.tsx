@@ -244,5 +244,19 @@ describe('one shock', () => {
     expect(
       await screen.findByRole('heading', { level: 1, name: 'We cannot show this shock' }),
     ).toBeInTheDocument();
+    expect(screen.getByRole('link', { name: 'Look at all sizes' })).toHaveAttribute('href', '/shocks');
+  });
+
+  it('explains the words of its own table, and no others', async () => {
+    answerWith({ '/shocks/maker-one-210x55': { ...page, remote: 'pull-to-open' } });
+    renderRoutes(routes, '/shocks/maker-one-210x55');
+    const words = within(await screen.findByRole('navigation', { name: 'Words explained' }));
+    expect(words.getAllByRole('link').map((link) => link.getAttribute('href'))).toEqual([
+      '/help/eye-to-eye',
+      '/help/stroke-is-not-travel',
+      '/help/hardware',
+      '/help/air-or-coil',
+      '/help/remote',
+    ]);
   });
 });

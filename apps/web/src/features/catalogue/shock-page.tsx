@@ -18,6 +18,7 @@ import { formatDay } from '../../lib/format-date';
 import { formatSize, formatWithUnit } from '../../lib/format-figure';
 import { formatMoney } from '../../lib/format-money';
 import { usePageTitle } from '../../lib/page-title';
+import { topics } from '../help/topics';
 import { shockQuery } from './api';
 import { InTheBox } from './in-the-box';
 import { NotChecked } from './not-checked';
@@ -44,7 +45,16 @@ export function ShockPage() {
   const { data: page, error } = useQuery(shockQuery(sizeId));
   const name = page ? `${page.makerName} ${page.modelName}` : 'One shock';
   usePageTitle(page ? `${name} ${sizeWords(page.sizeKey)}` : name);
-  if (error) return <LoadFailed error={error} what="this shock" />;
+  if (error) {
+    return (
+      <LoadFailed
+        error={error}
+        what="this shock"
+        gone="No shock of the catalogue has this address. It may have been taken off."
+        next={{ to: '/shocks', label: 'Look at all sizes' }}
+      />
+    );
+  }
   if (!page) {
     return (
       <Page>
@@ -100,6 +110,7 @@ export function ShockPage() {
       </Part>
       <Part title="Specification" note={`From: ${sourceWords(page.source)}.`}>
         <Specification page={page} />
+        <Words page={page} />
       </Part>
       <Part title="In the box">
         <InTheBox page={page} />
@@ -189,5 +200,31 @@ function Specification({ page }: { page: ShockView }) {
         />
       ))}
     </chakra.div>
+  );
+}
+
+/** The words of the table that have a page of their own. */
+function Words({ page }: { page: ShockView }) {
+  const { drawing } = page;
+  const ends = [drawing.bodyEnd.kind, drawing.shaftEnd.kind];
+  const words = topics.filter(({ path }) => {
+    if (path === '/help/trunnion') return ends.includes('trunnion');
+    if (path === '/help/hardware') return ends.includes('eyelet');
+    if (path === '/help/reservoir') return page.reservoir;
+    if (path === '/help/remote') return page.remote !== null;
+    return true;
+  });
+  return (
+    <chakra.nav aria-label="Words explained" marginTop="4">
+      <chakra.ul listStyleType="none" display="flex" flexWrap="wrap" columnGap="6">
+        {words.map(({ path, title }) => (
+          <li key={path}>
+            <TextLink to={path} display="inline-flex" alignItems="center" minHeight="target">
+              {title}
+            </TextLink>
+          </li>
+        ))}
+      </chakra.ul>
+    </chakra.nav>
   );
 }

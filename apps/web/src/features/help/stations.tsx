@@ -14,7 +14,7 @@ const Station = chakra('button', {
     cursor: 'pointer',
     _first: { borderLeftRadius: 'control', marginLeft: '0' },
     _last: { borderRightRadius: 'control' },
-    _hover: { color: 'ink' },
+    '&[aria-pressed=false]:hover': { color: 'ink', bg: 'wash' },
     _focusVisible: { position: 'relative' },
     // As in the unit switch: our tokens are the reader's own colours in that mode.
     '&[aria-pressed=true]': { bg: 'ink', color: 'paper', borderColor: 'ink', forcedColorAdjust: 'none' },

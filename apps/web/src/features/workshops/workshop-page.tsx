@@ -49,7 +49,16 @@ export function WorkshopPage() {
   const [opened] = useState(() => new Date());
   const { data: workshop, error } = useQuery(workshopQuery(workshopId));
   usePageTitle(workshop?.name ?? 'One workshop');
-  if (error) return <LoadFailed error={error} what="this workshop" />;
+  if (error) {
+    return (
+      <LoadFailed
+        error={error}
+        what="this workshop"
+        gone="No workshop has this address. It may have left us."
+        next={{ to: '/workshops', label: 'Look at all workshops' }}
+      />
+    );
+  }
   const above = (
     <TextLink to="/workshops" display="inline-flex" alignItems="center" minHeight="target">
       Workshops

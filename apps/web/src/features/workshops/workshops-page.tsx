@@ -39,7 +39,16 @@ export function WorkshopsPage() {
   const [search, setSearch] = useSearchParams();
   const from = search.get('from') ?? '';
   const { data, error } = useQuery(workshopsQuery(from));
-  if (error) return <LoadFailed error={error} what="these workshops" />;
+  if (error) {
+    return (
+      <LoadFailed
+        error={error}
+        what="these workshops"
+        gone="There is no town of that name in the list."
+        next={{ to: '/workshops', label: 'Look at all workshops' }}
+      />
+    );
+  }
   return (
     <Page>
       <PageHeading lead="Workshops that fit what you choose. Nothing is sent to one before it has accepted your fitting.">

@@ -1,7 +1,7 @@
 import { useId, type CSSProperties } from 'react';
 import { airForceN, coilForceN, sagMm, samples, strokeMm } from './spring-curves';
 
-const [width, height, left, bottom] = [340, 210, 46, 34];
+const [width, height, left, bottom] = [340, 204, 46, 24];
 const topN = 8000;
 const x = (mm: number): number => left + (mm / strokeMm) * (width - left - 44);
 const y = (newton: number): number => height - bottom - (newton / topN) * (height - bottom - 24);

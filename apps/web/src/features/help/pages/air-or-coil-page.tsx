@@ -38,8 +38,8 @@ export function AirOrCoilPage() {
       <Prose>
         <h2>The difference in one picture</h2>
         <p>
-          Both springs below carry the same rider at the same sag. From there the air spring grows stiffer the
-          further it goes, the coil stays as it is.
+          Both springs below carry the same rider at the same sag. In the middle of the stroke the air spring
+          gives a little more, towards the end it grows stiff; the coil stays as it is.
         </p>
       </Prose>
       <DrawingSheet caption="Slow force, worked out for an air spring of usual proportions at 203 psi and for the coil that gives the same sag, 599 lb/in with one turn of preload. An example, not a setting.">
