@@ -130,6 +130,9 @@ function greatestOf(of: Corners, axis: 0 | 1): number {
   return greatest;
 }
 
-/** The same for polygons as lists of points. */
-export const polygonDistance = (a: readonly Point[], b: readonly Point[]): number =>
-  cornersDistance(cornersOf(a), cornersOf(b), { a: 0, b: 0 });
+/** The same for polygons as lists of points; NaN where a corner is no number. */
+export function polygonDistance(a: readonly Point[], b: readonly Point[]): number {
+  const corners = [cornersOf(a), cornersOf(b)] as const;
+  const sound = corners.every((of) => of.every((value) => Number.isFinite(value)));
+  return sound ? cornersDistance(...corners, { a: 0, b: 0 }) : NaN;
+}

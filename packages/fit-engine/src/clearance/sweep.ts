@@ -28,7 +28,12 @@ export function sweep(room: FrameRoom, shock: SweptShock, floorMm = 0): SweepRes
   const { strokeMm, eyeToEyeMm } = shock;
   const { parts, left, swingDrawn, movementNotDrawn } = drawnRoom(room, strokeMm);
   const nothing = { distanceMm: null, atShockTravelMm: 0, part: '', movementNotDrawn };
-  const usable = shock.body.length >= 3 && finite(shock.body) && strokeMm > 0 && eyeToEyeMm > strokeMm;
+  const usable =
+    shock.body.length >= 3 &&
+    finite(shock.body) &&
+    strokeMm > 0 &&
+    eyeToEyeMm > strokeMm &&
+    eyeToEyeMm < Infinity;
   if (!usable) return { ...nothing, incomplete: 'shock' };
   if (!swingDrawn) return { ...nothing, incomplete: 'swing' };
   const mover = shockMover(room, shock);

@@ -18,14 +18,16 @@ export interface Curve {
   usableForAdvice: boolean;
 }
 
-export const within = (value: number, end: number): number => Math.min(Math.max(value, 0), end);
+/** Held within 0 and an end; NaN for what is no number, which no end may stand for. */
+export const within = (value: number, end: number): number =>
+  Number.isFinite(value) ? Math.min(Math.max(value, 0), end) : NaN;
 
 /**
  * Where a rising function reaches a value, by bisection kept going until the interval is a nanometre (at most 60
  * halvings); held at the ends.
  */
 export function inverseOf(rising: (x: number) => number, value: number, end: number): number {
-  if (Number.isNaN(value)) return NaN;
+  if (!Number.isFinite(value) || !Number.isFinite(end)) return NaN;
   if (!(value > 0)) return 0;
   if (value >= rising(end)) return end;
   let [low, high] = [0, end];

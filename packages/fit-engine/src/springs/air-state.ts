@@ -37,7 +37,8 @@ function volumeRatios(state: AirState, byMm: number): [growth: number, shrink: n
   const volume = state.volumeMm3 - state.areaMm2 * byMm;
   const growth =
     state.negativeAreaMm2 === 0 ? 1 : 1 + (state.negativeAreaMm2 * byMm) / state.negativeVolumeMm3;
-  return volume > 0 && growth > 0 ? [growth, state.volumeMm3 / volume] : [NaN, NaN];
+  const sound = volume > 0 && growth > 0 && Number.isFinite(state.negativeVolumeMm3);
+  return sound ? [growth, state.volumeMm3 / volume] : [NaN, NaN];
 }
 
 /** Force on the shaft, N, without the damper's gas. */

@@ -19,4 +19,4 @@ export const geopotentialM = (mapHeightM: number): number =>
 
 /** Absolute pressure of a sealed fill at another temperature, constant height. Temperatures in kelvin, above 0. */
 export const fillAtTemperatureKPa = (absKPa: number, filledAtK: number, nowK: number): number =>
-  filledAtK > 0 && nowK > 0 ? (absKPa * nowK) / filledAtK : NaN;
+  filledAtK > 0 && filledAtK < Infinity && nowK > 0 ? (absKPa * nowK) / filledAtK : NaN;

@@ -15,6 +15,6 @@ export function wheelRateNPerMm(
   return (shockRateNPerMm * ratio - shockForceN * curve.slopeAt(shockMm)) / ratio ** 3;
 }
 
-/** Natural frequency at sag, Hz. @param massKg sprung mass on the wheel, load / g */
+/** Natural frequency at sag, Hz; NaN for a falling rate. @param massKg sprung mass on the wheel, load / g */
 export const frequencyHz = (wheelRate: number, massKg: number): number =>
-  Math.sqrt((1000 * wheelRate) / massKg) / (2 * Math.PI);
+  Number.isFinite(massKg) ? Math.sqrt((1000 * wheelRate) / massKg) / (2 * Math.PI) : NaN;

@@ -5,25 +5,10 @@ import type { FitQuestion } from '../../src/facts.js';
 import { judge } from '../../src/judge.js';
 import { resolveSize } from '../../src/sizing/resolve-size.js';
 import { aCoilShock, aFrame, anEntry, aPinEnd, aPresentShock, aQuestion, aShock, fact } from './questions.js';
+import { spoilt } from './spoilt.js';
 
 const bad = [NaN, Infinity, -Infinity] as const;
 const fitting = ['bolts-straight-in', 'fits-with-work'];
-
-/** Copies of a value, each with one of its numbers replaced. */
-function spoilt<T>(value: T, by: number): T[] {
-  if (typeof value === 'number') return [by as T];
-  if (typeof value !== 'object' || value === null) return [];
-  return Object.entries(value).flatMap(([key, inner]) =>
-    spoilt(inner as unknown, by).map((other) => {
-      const copy = (Array.isArray(value) ? [...(value as unknown[])] : { ...value }) as Record<
-        string,
-        unknown
-      >;
-      copy[key] = other;
-      return copy as T;
-    }),
-  );
-}
 
 /** Numbers that a judgement would put on a screen or a job sheet. */
 function numbersOf({ spring, answers }: Judgement): number[] {
