@@ -41,7 +41,7 @@ const Item = chakra(NavLink, {
   },
 });
 
-/** Ways to look around: on a telephone at the foot of the page. */
+/** Ways to look around: where there is no room for them, they stand at the foot of the page. */
 const looking = [
   { to: '/shocks', name: 'Shocks' },
   { to: '/workshops', name: 'Workshops' },
@@ -77,7 +77,7 @@ export function Header() {
         >
           <Item to="/measure-up">Measure-up</Item>
           {looking.map(({ to, name }) => (
-            <Item key={to} to={to} display={{ base: 'none', md: 'inline-flex' }}>
+            <Item key={to} to={to} display={{ base: 'none', lg: 'inline-flex' }}>
               {name}
             </Item>
           ))}

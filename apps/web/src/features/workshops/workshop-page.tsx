@@ -241,6 +241,7 @@ function Where({ workshop }: { workshop: WorkshopView }) {
           borderRadius="card"
           padding="3"
           marginTop="4"
+          maxWidth="30rem"
         >
           <PlaceMap towns={data.towns} workshops={data.workshops} chosen={id} />
           <chakra.p

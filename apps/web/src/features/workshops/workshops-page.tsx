@@ -62,7 +62,7 @@ export function WorkshopsPage() {
           rowGap="6"
           alignItems="start"
         >
-          <chakra.div order={{ lg: 1 }} position={{ lg: 'sticky' }} top="6">
+          <chakra.div order={{ lg: 1 }} position={{ lg: 'sticky' }} top="6" maxWidth="30rem">
             <Field id="from" label="Distances from">
               {(control) => (
                 <Select
