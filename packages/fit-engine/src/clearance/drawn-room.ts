@@ -1,5 +1,5 @@
 import type { FrameOutline, FrameRoom } from '../facts.js';
-import { partMover, type Mover } from './motion.js';
+import { partMover, waysOf, type Mover } from './motion.js';
 import { cornersOf, type Corners } from './polygon-distance.js';
 
 /** A part of the frame whose outline and motion can be used over a whole stroke. */
@@ -10,6 +10,8 @@ export interface DrawnPart {
   toleranceMm: number;
   /** Both ends of the stroke and every travel at which its motion or the shock's swing bends, ascending. */
   bends: readonly number[];
+  /** The longest way that any point of it has gone at each bend, mm. */
+  ways: readonly number[];
 }
 
 /** The drawings of a frame for one stroke, looked through once for all shocks of that stroke. */
@@ -51,15 +53,21 @@ function bendsOf(tables: readonly Rows[], strokeMm: number): number[] {
 
 function lookThrough(room: FrameRoom, strokeMm: number): DrawnRoom {
   const usable = room.outlines.filter((part) => drawn(part, strokeMm));
+  const swingBends = bendsOf([room.swing], strokeMm);
   return {
     swingDrawn: covers(room.swing, strokeMm),
-    parts: usable.map((part) => ({
-      name: part.name,
-      mover: partMover(part),
-      corners: cornersOf(part.polygon),
-      toleranceMm: part.toleranceMm,
-      bends: bendsOf([room.swing, part.poses ?? []], strokeMm),
-    })),
+    parts: usable.map((part) => {
+      const mover = partMover(part);
+      const bends = part.poses ? bendsOf([room.swing, part.poses], strokeMm) : swingBends;
+      return {
+        name: part.name,
+        mover,
+        corners: cornersOf(part.polygon),
+        toleranceMm: part.toleranceMm,
+        bends,
+        ways: waysOf(mover, bends),
+      };
+    }),
     left: room.outlines.find((part) => !drawn(part, strokeMm))?.name ?? null,
     movementNotDrawn: room.outlines.some(
       ({ moves, poses }) => (moves || poses) && !(poses && covers(poses, strokeMm)),

@@ -106,4 +106,16 @@ export function longestWay({ reachMm }: Mover, from: Pose, to: Pose): number {
   return turn * reachMm + Math.max(lengthOf(to.x - from.x, to.y - from.y), Math.abs(far - near) + arc);
 }
 
+/** The longest way from the first of some travels to each of them, along all between, mm. */
+export function waysOf(mover: Mover, travels: readonly number[]): number[] {
+  let gone = 0;
+  let before: Pose | null = null;
+  return travels.map((travel) => {
+    const pose = mover.poseAt(travel);
+    if (before) gone += longestWay(mover, before, pose);
+    before = pose;
+    return gone;
+  });
+}
+
 const lengthOf = (x: number, y: number): number => Math.sqrt(x * x + y * y);

@@ -61,7 +61,8 @@ function looker(a: Moving, b: Moving, toleranceMm: number): (s: number) => Insta
   const [bufferA, bufferB] = [bufferOf(a, 0), bufferOf(b, 1)];
   const guess = { a: 0, b: 0 };
   return (s) => {
-    const [poseA, poseB] = [a.mover.poseAt(s), b.mover.poseAt(s)];
+    const poseA = a.mover.poseAt(s);
+    const poseB = b.mover.poseAt(s);
     placeCorners(a.corners, poseA, bufferA);
     const still = poseB.x === 0 && poseB.y === 0 && poseB.deg === 0;
     if (!still) placeCorners(b.corners, poseB, bufferB);
@@ -75,37 +76,33 @@ const wayOf = (a: Moving, b: Moving, p: Instant, q: Instant): number =>
 const boundOf = (p: Instant, q: Instant, way: number): number =>
   Math.max(0, Math.min(p.free, q.free, (p.free + q.free - way) / 2));
 
+/** The travels at which a motion bends, and how far each outline has gone there. */
+export interface Bends {
+  /** Ascending, from 0 to the stroke: no motion bends between two of them. */
+  at: readonly number[];
+  waysA: readonly number[];
+  waysB: readonly number[];
+}
+
 /**
  * Whether two outlines stay at least so far apart over the whole travel, by looking at as few of the bends as it
  * takes: ways add up over bends. Every look is kept in `seen`.
  */
 function staysClear(
-  a: Moving,
-  b: Moving,
-  bends: readonly number[],
+  { at: travels, waysA, waysB }: Bends,
   seen: (Instant | undefined)[],
   lookAt: (s: number) => Instant,
   beatMm: number,
 ): boolean {
-  const at = (i: number): Instant => (seen[i] ??= lookAt(bends[i] as number));
-  // The way from the start to each bend.
-  const ways = [0];
-  let [poseA, poseB] = [at(0).a, at(0).b];
-  for (let i = 1; i < bends.length; i += 1) {
-    const s = bends[i] as number;
-    const [nextA, nextB] = [a.mover.poseAt(s), b.mover.poseAt(s)];
-    ways.push(
-      (ways[i - 1] as number) + longestWay(a.mover, poseA, nextA) + longestWay(b.mover, poseB, nextB),
-    );
-    [poseA, poseB] = [nextA, nextB];
-  }
+  const at = (i: number): Instant => (seen[i] ??= lookAt(travels[i] as number));
+  const way = (i: number): number => (waysA[i] as number) + (waysB[i] as number);
   const clear = (i: number, j: number): boolean => {
     const [p, q] = [at(i), at(j)];
-    if (boundOf(p, q, (ways[j] as number) - (ways[i] as number)) >= beatMm) return true;
+    if (boundOf(p, q, way(j) - way(i)) >= beatMm) return true;
     const mid = Math.floor((i + j) / 2);
     return mid > i && p.free >= beatMm && q.free >= beatMm && clear(i, mid) && clear(mid, j);
   };
-  return clear(0, bends.length - 1);
+  return clear(0, travels.length - 1);
 }
 
 /**
@@ -114,12 +111,11 @@ function staysClear(
  * Between two travels no pair of points can close more than the longest way that any point goes, so the distance in
  * between is at least (d0 + d1 - way) / 2. Intervals whose bound could be the least are halved, down to 1/128 mm;
  * those that cannot are left alone, however long. What is given away is on the safe side.
- * @param bends travels at which a motion bends, ascending, from 0 to the stroke: no interval spans one
  */
 export function nearest(
   a: Moving,
   b: Moving,
-  bends: readonly number[],
+  bends: Bends,
   { lookAt, atEnds }: Begun,
   { beatMm, floorMm }: Limits,
 ): Nearest {
@@ -132,9 +128,9 @@ export function nearest(
     if (free < found.mm) found = { mm: free, at: s };
   };
   const looked: (Instant | undefined)[] = [];
-  [looked[0], looked[bends.length - 1]] = atEnds;
-  const clear = staysClear(a, b, bends, looked, lookAt, beatMm);
-  const seen = clear ? looked : bends.map((s, i) => looked[i] ?? lookAt(s));
+  [looked[0], looked[bends.at.length - 1]] = atEnds;
+  const clear = staysClear(bends, looked, lookAt, beatMm);
+  const seen = clear ? looked : bends.at.map((s, i) => looked[i] ?? lookAt(s));
   for (const instant of seen) if (instant) saw(instant);
   if (clear) return found;
   const look = (p: Instant, q: Instant): void => {

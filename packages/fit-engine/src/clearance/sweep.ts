@@ -1,6 +1,6 @@
 import type { FrameRoom } from '../facts.js';
 import { drawnRoom, finite } from './drawn-room.js';
-import { shockMover, type SweptShock } from './motion.js';
+import { shockMover, waysOf, type SweptShock } from './motion.js';
 import { begin, nearest, type Nearest } from './nearest.js';
 import { cornersOf } from './polygon-distance.js';
 
@@ -19,8 +19,9 @@ export interface SweepResult {
 
 /**
  * The least distance of the shock's body to the frame's parts over the stroke, mm: steps of at most 0.5 mm wherever
- * something nearer might hide, finer where it is least, less what a step can hide and less each part's stated tolerance; never below 0. A moving part
- * without a pose table that spans the stroke, or an outline or swing that cannot be used, makes it incomplete.
+ * something nearer might hide, finer where it is least, less what a step can hide and less each part's stated
+ * tolerance; never below 0. A moving part without a pose table that spans the stroke, or an outline or swing that
+ * cannot be used, makes it incomplete.
  * @param floorMm above 0: a distance of this or less is of no interest; it is given as first seen, perhaps without
  *   part and travel
  */
@@ -44,10 +45,14 @@ export function sweep(room: FrameRoom, shock: SweptShock, floorMm = 0): SweepRes
   if (floorMm > 0 && seenMm <= floorMm) {
     return { distanceMm: seenMm, atShockTravelMm: 0, part: '', incomplete: left, movementNotDrawn };
   }
+  // Parts that stand still share their bends.
+  let [bends, waysA]: readonly (readonly number[])[] = [];
   let least: (Nearest & { part: string }) | null = null;
   for (const { part, looks } of begun) {
     const beatMm = Math.min(least?.mm ?? Infinity, seenMm);
-    const found = nearest(body, part, part.bends, looks, { beatMm, floorMm });
+    if (part.bends !== bends) [bends, waysA] = [part.bends, waysOf(mover, part.bends)];
+    const along = { at: part.bends, waysA: waysA ?? [], waysB: part.ways };
+    const found = nearest(body, part, along, looks, { beatMm, floorMm });
     if (!least || found.mm < least.mm) least = { ...found, part: part.name };
     if (least.mm <= floorMm) break;
   }

@@ -38,3 +38,32 @@ export function inverseOf(rising: (x: number) => number, value: number, end: num
   }
   return (low + high) / 2;
 }
+
+/**
+ * The same where the slope is known: Newton's steps, each kept between values known to be too low and too high, and
+ * halving where a step would leave them; until a step is below a nanometre (at most 60 steps), held at the ends.
+ */
+export function inverseBySlope(
+  rising: (x: number) => number,
+  slope: (x: number) => number,
+  value: number,
+  end: number,
+): number {
+  if (!Number.isFinite(value) || !Number.isFinite(end)) return NaN;
+  if (!(value > 0)) return 0;
+  if (value >= rising(end)) return end;
+  let low = 0;
+  let high = end;
+  let x = within(value / slope(0), end);
+  for (let i = 0; i < 60; i += 1) {
+    const over = rising(x) - value;
+    if (over < 0) low = x;
+    else high = x;
+    const step = x - over / slope(x);
+    const next = step > low && step < high ? step : (low + high) / 2;
+    const moved = Math.abs(next - x);
+    x = next;
+    if (moved < 1e-9) break;
+  }
+  return x;
+}

@@ -1,10 +1,10 @@
-import { inverseOf, within, type Curve } from './curve.js';
+import { inverseBySlope, within, type Curve } from './curve.js';
 import { gauss5 } from './gauss.js';
 import { pieceAt, pchipPieces, slopeOf, valueOf, type Piece } from './pchip.js';
 
 /**
  * The curve of a table by wheel travel: s(w) is the integral of dw/LR (five-point Gauss-Legendre over sixteenths of
- * each piece, error far below a micrometre for smooth ratios), its inverse by bisection, and dLR/ds = LR dLR/dw.
+ * each piece, error far below a micrometre for smooth ratios), its inverse by bounded Newton steps, and dLR/ds = LR dLR/dw.
  */
 export function wheelTravelCurve(points: readonly (readonly [number, number])[], strokeMm: number): Curve {
   const pieces = pchipPieces(
@@ -25,16 +25,23 @@ export function wheelTravelCurve(points: readonly (readonly [number, number])[],
   const ends = knotsS.at(-1) ?? 0;
   const wheelTravelAt = (s: number): number => {
     const held = within(s, ends);
-    let i = knotsS.length - 2;
-    while (i > 0 && (knotsS[i] ?? 0) > held) i -= 1;
+    const i = knotBefore(knotsS, held);
     const [w0, w1, s0] = [knotsW[i] ?? 0, knotsW[i + 1] ?? 0, knotsS[i] ?? 0];
     const piece = pieceOf((w0 + w1) / 2);
-    return w0 + inverseOf((d) => gauss5((w) => 1 / valueOf(piece, w), w0, w0 + d), held - s0, w1 - w0);
+    const perWheel = (w: number): number => 1 / valueOf(piece, w);
+    return (
+      w0 +
+      inverseBySlope(
+        (d) => gauss5(perWheel, w0, w0 + d),
+        (d) => perWheel(w0 + d),
+        held - s0,
+        w1 - w0,
+      )
+    );
   };
   const shockTravelAt = (wheelMm: number): number => {
     const held = within(wheelMm, total);
-    let i = knotsW.length - 2;
-    while (i > 0 && (knotsW[i] ?? 0) > held) i -= 1;
+    const i = knotBefore(knotsW, held);
     const from = knotsW[i] ?? 0;
     const piece = pieceOf((from + (knotsW[i + 1] ?? 0)) / 2);
     return (knotsS[i] ?? 0) + gauss5((w) => 1 / valueOf(piece, w), from, held);
@@ -59,4 +66,16 @@ export function wheelTravelCurve(points: readonly (readonly [number, number])[],
     // The table's end is the travel already; what may be wrong is the shock travel it adds up to.
     usableForAdvice: Math.abs(ends - strokeMm) <= 0.03 * strokeMm,
   };
+}
+
+/** Index of the last knot at or before a value, the last knot of all left out; the first where the value lies before. */
+function knotBefore(knots: readonly number[], value: number): number {
+  let low = 0;
+  let high = knots.length - 1;
+  while (high - low > 1) {
+    const mid = (low + high) >> 1;
+    if ((knots[mid] ?? 0) > value) high = mid;
+    else low = mid;
+  }
+  return low;
 }
