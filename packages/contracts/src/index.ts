@@ -5,6 +5,8 @@ export * from './catalogue/catalogue.schema.js';
 export * from './measure-ups/answers.schema.js';
 export * from './measure-ups/measure-ups.schema.js';
 export * from './matches/matches.schema.js';
+export * from './matches/curves.schema.js';
+export * from './matches/clearance.schema.js';
 export * from './plans/plans.schema.js';
 export * from './bookings/bookings.schema.js';
 export * from './orders/orders.schema.js';

@@ -13,3 +13,5 @@ export * from './units/parse.js';
 export * from './units/format.js';
 export { mountFamily, presentSize } from './sizing/present-size.js';
 export { readingUncertaintyMm } from './sizing/reading-uncertainty.js';
+export * from './series/ride-series.js';
+export * from './series/clearance-scene.js';

@@ -1,4 +1,4 @@
-import type { MatchDetail, MatchesQuery, MatchesView, MatchRow, Verdict } from '@linkfell/contracts';
+import type { MatchDetail, MatchesQuery, MatchesView, Verdict } from '@linkfell/contracts';
 import type { ShockFacts } from '@linkfell/fit-engine';
 import { sagText } from './sag-text.js';
 import { Injectable } from '@nestjs/common';
@@ -21,16 +21,27 @@ const verdictOrder: readonly Verdict[] = [
   'needs-an-answer',
   'wont-fit',
 ];
+const wontFit = verdictOrder.indexOf('wont-fit');
 const noCost: FitCost = { partsMinor: null, selfFitMinor: null, fittedMinor: null, earliest: null };
 
-/** The cheapest way to have it: fitted or, where allowed, by oneself. */
-const allIn = ({ price }: MatchRow): number =>
-  price.fittedMinor ?? price.partsMinor ?? Number.MAX_SAFE_INTEGER;
+/** What the order of the rows is made from, before any row is. */
+interface Ranked {
+  shock: ShockFacts;
+  cost: FitCost;
+  group: number;
+  /** Null for a shock that a cheap check has refused: it is judged in full only when its row is sent. */
+  judged: Judged | null;
+}
 
-const orders: Record<MatchesQuery['order'], (a: MatchRow, b: MatchRow) => number> = {
+/** The cheapest way to have it: fitted or, where allowed, by oneself. */
+const allIn = ({ cost }: Ranked): number => cost.fittedMinor ?? cost.partsMinor ?? Number.MAX_SAFE_INTEGER;
+
+const compare = (a: string, b: string): number => (a < b ? -1 : a > b ? 1 : 0);
+
+const orders: Record<MatchesQuery['order'], (a: Ranked, b: Ranked) => number> = {
   cheapest: (a, b) => allIn(a) - allIn(b),
-  earliest: (a, b) => (a.earliest?.day ?? '9999').localeCompare(b.earliest?.day ?? '9999'),
-  lightest: (a, b) => a.massG - b.massG,
+  earliest: (a, b) => compare(a.cost.earliest?.day ?? '9999', b.cost.earliest?.day ?? '9999'),
+  lightest: (a, b) => a.shock.massG - b.shock.massG,
 };
 
 @Injectable()
@@ -53,14 +64,23 @@ export class MatchesService {
       ({ shock, judgement }) =>
         wanted(shock, applied) && (judgement.verdict !== 'wont-fit' || applied.wontFit === 'shown'),
     );
-    // Figures of a refused shock are made only for a rider who asks to see them.
     const asked = applied.wontFit === 'shown' ? refused.filter((shock) => wanted(shock, applied)) : [];
-    const shown = [...mayFit, ...judgeRefused(asked)];
-    const priced = shown.filter(({ judgement }) => judgement.verdict !== 'wont-fit');
+    const priced = mayFit.filter(({ judgement }) => judgement.verdict !== 'wont-fit');
     const costs = await this.costs.quoteMany(priced.map(requestOf), await this.placeOf(open));
-    const rows = shown.map((one) => matchRow(one, costs.get(one.shock.sizeId) ?? noCost));
-    const affordable = rows.filter(
-      (row) => applied.maxMinor === null || row.verdict === 'wont-fit' || allIn(row) <= applied.maxMinor,
+    const ranked = [
+      ...mayFit.map((one) => ranking(one, costs.get(one.shock.sizeId) ?? noCost)),
+      ...asked.map((shock) => ({ shock, cost: noCost, group: wontFit, judged: null })),
+    ].filter((one) => applied.maxMinor === null || one.group === wontFit || allIn(one) <= applied.maxMinor);
+    ranked.sort(
+      (a, b) => a.group - b.group || orders[applied.order](a, b) || compare(a.shock.sizeId, b.shock.sizeId),
+    );
+    const sent = ranked.slice(0, query.limit);
+    // Figures of a refused shock are made only for a rider who sees them.
+    const late = new Map(
+      judgeRefused(sent.flatMap(({ judged: one, shock }) => (one ? [] : [shock]))).map((one) => [
+        one.shock,
+        one,
+      ]),
     );
     const hiddenRefusals = applied.wontFit === 'hidden' ? counts['wont-fit'] : 0;
     return {
@@ -72,13 +92,12 @@ export class MatchesService {
       rider: { kg: riderKg(open), sagWindow: sagText(open.side) },
       applied,
       counts,
-      leftOut: judged.length + refused.length - affordable.length - hiddenRefusals,
-      rows: affordable.sort(
-        (a, b) =>
-          verdictOrder.indexOf(a.verdict) - verdictOrder.indexOf(b.verdict) ||
-          orders[applied.order](a, b) ||
-          a.sizeId.localeCompare(b.sizeId),
-      ),
+      leftOut: judged.length + refused.length - ranked.length - hiddenRefusals,
+      rows: sent.flatMap(({ judged: early, shock, cost }) => {
+        const one = early ?? late.get(shock);
+        return one ? [matchRow(one, cost)] : [];
+      }),
+      more: ranked.length - sent.length,
     };
   }
 
@@ -97,6 +116,13 @@ export class MatchesService {
     return place && this.dataSource.manager.findOneBy(Town, { id: place.townId });
   }
 }
+
+const ranking = (judged: Judged, cost: FitCost): Ranked => ({
+  shock: judged.shock,
+  cost,
+  group: verdictOrder.indexOf(judged.judgement.verdict),
+  judged,
+});
 
 const requestOf = (one: Judged) => ({
   key: one.shock.sizeId,

@@ -72,6 +72,8 @@ export const accessTable: Record<string, Row> = {
   'DELETE /api/measure-ups/:id/links': measureUpHolders,
   'GET /api/measure-ups/:id/matches': measureUpHolders,
   'GET /api/measure-ups/:id/matches/:sizeId': measureUpHolders,
+  'GET /api/measure-ups/:id/matches/:sizeId/clearance': measureUpHolders,
+  'GET /api/measure-ups/:id/matches/:sizeId/curves': measureUpHolders,
   'POST /api/measure-ups/:id/plans': measureUpHolders,
 
   'GET /api/plans/:id': measureUpHolders,

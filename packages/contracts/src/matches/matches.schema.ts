@@ -9,6 +9,8 @@ export const matchesQuery = z.object({
   maxMinor: z.coerce.number().int().min(0).optional(),
   order: z.enum(['cheapest', 'earliest', 'lightest']).default('cheapest'),
   wontFit: z.enum(['shown', 'hidden']).default('hidden'),
+  /** So many rows from the top; the order is over all. */
+  limit: z.coerce.number().int().min(1).max(1000).default(60),
 });
 export type MatchesQuery = z.infer<typeof matchesQuery>;
 
@@ -75,8 +77,10 @@ export const matchesView = z.object({
   counts: z.record(verdict, z.int()),
   /** Left out by spring, reservoir or budget. */
   leftOut: z.int(),
-  /** Ordered by verdict, then as asked. */
+  /** Ordered by verdict, then as asked; the first of them, see `limit`. */
   rows: z.array(matchRow),
+  /** How many more there are below the last row. */
+  more: z.int(),
 });
 export type MatchesView = z.infer<typeof matchesView>;
 

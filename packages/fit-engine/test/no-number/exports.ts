@@ -3,7 +3,14 @@ import type { FitQuestion } from '../../src/facts.js';
 import * as engine from '../../src/index.js';
 import { aPresentShock, aQuestion } from '../judging/questions.js';
 import { spoilt } from '../judging/spoilt.js';
-import { asIfUntold, readsNoFigure, refusesText, saysNone, type Complaints } from './complaints.js';
+import {
+  asIfUntold,
+  givesNoNumber,
+  readsNoFigure,
+  refusesText,
+  saysNone,
+  type Complaints,
+} from './complaints.js';
 
 const question = aQuestion();
 const refused = aQuestion({ shock: { ...question.shock, sizeKey: '210x50' } });
@@ -43,6 +50,60 @@ const size = engine.resolveSize(aPresentShock({ eyeToEye: open }), ['210x55'], '
 
 /** Its sentence names the figure. */
 const narrow = { code: 'diameter-too-wide', weight: 0 } as const;
+
+const load = { loadN: 550, midPercent: 28, patmKPa: 99 };
+const chambers = { areaMm2: 1000, negativeAreaMm2: 800, volumeMm3: 120000, negativeVolumeMm3: 30000 };
+/** Without a load or with a spring that cannot be, the leverage is drawn alone: no number of a spring comes out. */
+const seriesComplaints: Complaints = (by) =>
+  [
+    { kind: 'air' as const, chambers },
+    { kind: 'coil' as const, rateNPerMm: 90, preloadMm: 1 },
+  ].flatMap((spring) =>
+    spoilt([load, spring] as const, by).flatMap(([badLoad, badSpring]) => {
+      const frame = { table: null, travelMm: 145, strokeMm: 55 };
+      const drawn = engine.rideSeries(frame, badLoad, badSpring);
+      const whole = engine.rideSeries(frame, load, spring)?.spring ? [] : ['no spring was drawn'];
+      const endless = /NaN|null\]/.test(JSON.stringify(drawn?.spring ?? 'none')) ? ['an endless figure'] : [];
+      const none =
+        engine.rideSeries({ ...frame, strokeMm: by }, load, spring) === null ? [] : ['a curve came out'];
+      return [...whole, ...endless, ...none, ...(drawn?.spring ? ['a spring came out'] : [])];
+    }),
+  );
+const aReservoir = {
+  lengthMm: 90,
+  diameterMm: 40,
+  positionsDeg: [0],
+  outlines: [
+    {
+      positionDeg: 0,
+      polygon: [
+        [0, -20],
+        [120, -20],
+        [120, 20],
+        [0, 20],
+      ] as [number, number][],
+    },
+  ],
+};
+const aRoom = {
+  swing: [
+    [0, 0],
+    [55, 4],
+  ] as [number, number][],
+  outlines: [
+    {
+      name: 'down tube',
+      polygon: [
+        [-20, 40],
+        [200, 40],
+        [200, 60],
+      ] as [number, number][],
+      toleranceMm: 1,
+      poses: null,
+      moves: false,
+    },
+  ],
+};
 
 /** Every function that the package gives away. */
 export const exported: Readonly<Record<string, Complaints>> = {
@@ -124,4 +185,12 @@ export const exported: Readonly<Record<string, Complaints>> = {
     (kPa: number) => [engine.formatPressure(kPa), engine.formatPressure(kPa, 'bar')],
     900,
   ),
+  riderLoad: givesNoNumber((rider: FitQuestion['rider']) => engine.riderLoad(rider, null), question.rider),
+  rideSeries: seriesComplaints,
+  // What was told of the frame stands in the drawing; a spoilt part, table or position is left out.
+  clearanceScene: saysNone(engine.clearanceScene, aRoom, aReservoir, {
+    eyeToEyeMm: 210,
+    strokeMm: 55,
+    wayRound: 'body-to-frame' as const,
+  }),
 };
