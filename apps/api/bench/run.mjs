@@ -1,136 +1,159 @@
-// Measurements on the demo scenario, load generator included; bounded in count. Started by `npm run bench`.
-import { spawn } from 'node:child_process';
+// The API under load on a catalogue of full size; started by `npm run bench`. What is measured: README.md beside it.
 import { randomBytes } from 'node:crypto';
-import { createServer } from 'node:net';
-import { fileURLToPath } from 'node:url';
+import { cpus } from 'node:os';
 
+import { startFakeStripe } from '@linkfell/fake-stripe';
 import pg from 'pg';
+
+import { benchCheckout } from './checkout.mjs';
+import { counted, fillFrames, fillListings, fillSizes } from './fill.mjs';
+import { quantile, underLoad } from './load.mjs';
+import { drawRiders } from './riders.mjs';
+import { fromHere, startServer } from './servers.mjs';
 
 const needed = (name) => {
   const value = process.env[name];
   if (!value) throw new Error(`${name} is not set; npm run bench sets it`);
   return value;
 };
-const quantile = (list, q) =>
-  [...list].sort((a, b) => a - b)[Math.min(list.length - 1, Math.floor(list.length * q))];
+/** Smaller for a quick try: BENCH_SCALE=0.1. What is printed says the size that was measured. */
+const scale = Number(process.env.BENCH_SCALE ?? 1);
+const size = {
+  sheets: 2000 * scale,
+  sizes: Math.max(200, 5000 * scale),
+  listings: 100_000 * scale,
+  riders: 1000 * scale,
+  orders: Math.max(10, 100 * scale),
+};
+const secret = randomBytes(32).toString('hex');
+const percent = (ratio) => `${(100 * ratio).toFixed(1)} %`;
 
-const freePort = () =>
-  new Promise((resolve) => {
-    const server = createServer().listen(0, '127.0.0.1', () => {
-      const { port } = server.address();
-      server.close(() => resolve(port));
-    });
-  });
+const apiSettings = (databaseUrl, stripeUrl) => ({
+  DATABASE_URL: databaseUrl,
+  SESSION_SECRET: secret,
+  STRIPE_SECRET_KEY: 'sk_test_linkfell',
+  STRIPE_WEBHOOK_SECRET: 'whsec_none',
+  STRIPE_API_BASE: stripeUrl,
+  SMTP_URL: 'smtp://127.0.0.1:9',
+  LOG_LEVEL: 'silent',
+  RATE_LIMIT_SCALE: '1000000',
+});
 
-async function timed(count, ask) {
-  const times = [];
-  for (let i = 0; i < count; i += 1) {
-    const start = performance.now();
-    await ask(i);
-    times.push(performance.now() - start);
+const matchesOf = (riders) =>
+  riders.map(({ id, cookie }) => ({
+    method: 'GET',
+    path: `/api/measure-ups/${id}/matches?limit=20`,
+    headers: { cookie },
+  }));
+
+/** One server at a time is under load, each warmed by a tenth of the requests first. */
+async function measured(start, requests) {
+  const server = await start();
+  try {
+    await underLoad(server.url, requests.slice(0, Math.ceil(requests.length / 10)), { pid: server.pid });
+    return await underLoad(server.url, requests, { pid: server.pid });
+  } finally {
+    await server.stop();
   }
-  return times;
 }
 
-const headers = {
-  'X-Linkfell-Csrf': '1',
-  'Sec-Fetch-Site': 'same-origin',
-  'Content-Type': 'application/json',
-};
-
-/** Requests one after the other, so that a ratio of medians is a ratio of work done. */
-async function benchApi(url, pid) {
-  const frames = (await (await fetch(`${url}/api/frames`)).json()).frames;
-  const riders = [];
-  for (let i = 0; i < 60; i += 1) {
-    const made = await fetch(`${url}/api/measure-ups`, { method: 'POST', headers, body: '{}' });
-    const cookie = made.headers
-      .getSetCookie()
-      .map((each) => each.split(';')[0])
-      .join('; ');
-    const { id } = await made.json();
-    const answers = {
-      frame: {
-        kind: 'listed',
-        frameId: frames[i % frames.length].id,
-        modelYear: null,
-        frameSize: null,
-        chip: null,
-      },
-      weight: { riderKg: 60 + (i % 40), kitKg: 3 },
-      'bike-mass': { kg: 14 },
-      style: { style: 'trail' },
-      'remote-wish': { wants: false, acceptsExternal: null },
-    };
-    for (const [question, value] of Object.entries(answers)) {
-      await fetch(`${url}/api/measure-ups/${id}/answers/${question}`, {
-        method: 'PUT',
-        headers: { ...headers, cookie },
-        body: JSON.stringify({ state: 'known', value }),
+/** How many sizes are judged for a rider, and how many of them may fit. */
+async function judgedFor(startApi, riders) {
+  const server = await startApi();
+  try {
+    let [judged, mayFit] = [0, 0];
+    for (const { id, cookie } of riders) {
+      const answer = await fetch(`${server.url}/api/measure-ups/${id}/matches?limit=20`, {
+        headers: { cookie },
       });
+      const { counts } = await answer.json();
+      judged += Object.values(counts).reduce((a, b) => a + b, 0);
+      mayFit += judged === 0 ? 0 : Object.values(counts).reduce((a, b) => a + b, 0) - counts['wont-fit'];
     }
-    riders.push({ id, cookie });
+    return { judged: Math.round(judged / riders.length), mayFit: Math.round(mayFit / riders.length) };
+  } finally {
+    await server.stop();
   }
-  let judged = 0;
-  const matches = await timed(180, async (i) => {
-    const { id, cookie } = riders[i % riders.length];
-    const { counts } = await (
-      await fetch(`${url}/api/measure-ups/${id}/matches`, { headers: { cookie } })
-    ).json();
-    judged += Object.values(counts).reduce((a, b) => a + b, 0);
-  });
-  const plain = await timed(180, async () => (await fetch(`${url}/api/towns`)).json());
-  const ratio = quantile(plain, 0.5) / quantile(matches, 0.5);
+}
+
+async function bench(client, databaseUrl, stripeUrl) {
+  const startApi = () => startServer('../dist/main.js', '/health/ready', apiSettings(databaseUrl, stripeUrl));
+  console.log(`\nThe API under load (${cpus().length} cores of ${cpus()[0]?.model ?? 'an unknown kind'})`);
+  await fillFrames(client, size.sheets);
+  await fillSizes(client, size.sizes);
+  const riders = await drawRiders(client, size.riders, secret);
+  await fillListings(client, size.listings / 10);
+  const few = await counted(client);
+  const withFew = await measured(startApi, matchesOf(riders));
+  await fillListings(client, size.listings);
+  const many = await counted(client);
+  const withMany = await measured(startApi, matchesOf(riders));
+  const { judged, mayFit } = await judgedFor(startApi, riders.slice(0, 50));
+
+  const { rows } = await client.query('SELECT id FROM listings ORDER BY random() LIMIT $1', [size.riders]);
+  // So fast that it needs ten times the requests to be measured at all.
+  const byKey = Array.from({ length: 10 * size.riders }, (_, i) => rows[i % rows.length]).map(({ id }) => ({
+    method: 'GET',
+    path: `/listings/${id}`,
+  }));
+  const startBare = () =>
+    startServer('bare-route.mjs', `/listings/${rows[0].id}`, { DATABASE_URL: databaseUrl });
+  const bare = await measured(startBare, byKey);
+
   console.log(
-    `matches: median ${quantile(matches, 0.5).toFixed(1)} ms, p95 ${quantile(matches, 0.95).toFixed(1)} ms, ${judged} sizes judged in 180 requests`,
+    `  catalogue       ${many.sheets} frame sheets, ${many.sizes} sizes, ${many.listings} listings; ${riders.length} riders, each asked once`,
   );
   console.log(
-    `a plain route that reads one small table: median ${quantile(plain, 0.5).toFixed(1)} ms; ratio ${(100 * ratio).toFixed(0)} %`,
+    `  matches         ${withMany.perSecond.toFixed(0)} a second, median ${quantile(withMany.times, 0.5).toFixed(1)} ms, p95 ${quantile(withMany.times, 0.95).toFixed(1)} ms; ${judged} sizes judged for a rider, of which ${mayFit} may fit`,
   );
-  const { readFileSync } = await import('node:fs');
-  const rss = /VmRSS:\s+(\d+)/.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))?.[1];
-  console.log(`server process: ${Math.round(Number(rss) / 1024)} MB resident`);
+  console.log(
+    `  bare route      ${bare.perSecond.toFixed(0)} a second, p95 ${quantile(bare.times, 0.95).toFixed(1)} ms`,
+  );
+  console.log(
+    `  ratio           ${percent(withMany.perSecond / bare.perSecond)} of the bare route (aim: at least 10 %)`,
+  );
+  console.log(
+    `  ten times more  ${few.listings} to ${many.listings} listings cost ${(withFew.perSecond / withMany.perSecond).toFixed(2)} times the time (aim: at most 1.3)`,
+  );
+  console.log(`  memory          ${withMany.mostMb} MB resident at most (aim: below 300)`);
+
+  const api = await startServer('../dist/main.js', '/health/ready', apiSettings(databaseUrl, stripeUrl), [
+    '--import',
+    fromHere('watch-transactions.mjs'),
+  ]);
+  try {
+    const { orders, statements, oursMs, rawMs, ratio } = await benchCheckout(
+      api,
+      riders,
+      databaseUrl,
+      size.orders,
+    );
+    console.log(
+      `  checkout        ${orders} orders, ${statements} statements in one transaction, ${oursMs.toFixed(1)} ms; the plain client ${rawMs.toFixed(1)} ms: ${percent(ratio)} (aim: at least 25 %)`,
+    );
+  } finally {
+    await api.stop();
+  }
 }
 
 async function main() {
   const admin = needed('TEST_DATABASE_ADMIN_URL');
   const name = `linkfell_bench_${randomBytes(4).toString('hex')}`;
-  const client = new pg.Client({ connectionString: admin });
-  await client.connect();
-  await client.query(`CREATE DATABASE ${name} TEMPLATE ${needed('TEST_TEMPLATE_DB')}`);
+  const adminClient = new pg.Client({ connectionString: admin });
+  await adminClient.connect();
+  await adminClient.query(`CREATE DATABASE ${name} TEMPLATE ${needed('TEST_TEMPLATE_DB')}`);
   const database = new URL(admin);
   database.pathname = `/${name}`;
-  const port = await freePort();
-  const url = `http://127.0.0.1:${port}`;
-  const server = spawn(process.execPath, [fileURLToPath(new URL('../dist/main.js', import.meta.url))], {
-    stdio: ['ignore', 'ignore', 'inherit'],
-    env: {
-      PATH: process.env.PATH,
-      NODE_ENV: 'production',
-      PORT: String(port),
-      PUBLIC_URL: url,
-      DATABASE_URL: database.toString(),
-      SESSION_SECRET: randomBytes(32).toString('hex'),
-      STRIPE_SECRET_KEY: 'sk_test_none',
-      STRIPE_WEBHOOK_SECRET: 'whsec_none',
-      STRIPE_API_BASE: 'http://127.0.0.1:9',
-      SMTP_URL: 'smtp://127.0.0.1:9',
-      LOG_LEVEL: 'silent',
-      RATE_LIMIT_SCALE: '100000',
-    },
-  });
+  const client = new pg.Client({ connectionString: database.toString() });
+  const stripe = await startFakeStripe();
   try {
-    for (let tries = 0; tries < 200; tries += 1) {
-      if ((await fetch(`${url}/health/ready`).catch(() => null))?.ok) break;
-      await new Promise((resolve) => setTimeout(resolve, 100));
-    }
-    await benchApi(url, server.pid);
+    await client.connect();
+    await bench(client, database.toString(), stripe.url);
   } finally {
-    const ended = new Promise((resolve) => server.once('exit', resolve));
-    server.kill('SIGTERM');
-    await ended;
-    await client.query(`DROP DATABASE IF EXISTS ${name} WITH (FORCE)`);
     await client.end();
+    await stripe.close();
+    await adminClient.query(`DROP DATABASE IF EXISTS ${name} WITH (FORCE)`);
+    await adminClient.end();
   }
 }
 

@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { useQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
 import { useParams, useSearchParams } from 'react-router-dom';
+import { Button } from '../../components/button';
 import { LoadFailed } from '../../components/load-failed';
 import { Notice } from '../../components/notice';
 import { Page } from '../../components/page';
@@ -17,6 +18,9 @@ import { sheetOf } from './match-groups';
 import { MatchTable } from './match-table';
 import { Sentence } from './sentence';
 
+/** How many rows are fetched at once. */
+const step = 60;
+
 /** The fitting sheet. */
 export function MatchesPage() {
   const { id = '' } = useParams();
@@ -25,6 +29,15 @@ export function MatchesPage() {
   const { data: view, error, isPlaceholderData } = useQuery(matchesQueryOptions(id, text ? `?${text}` : ''));
   usePageTitle(view ? `Fitting sheet: ${view.title}` : 'Fitting sheet');
   const sheet = useMemo(() => (view && view.rows.length > 0 ? sheetOf(view) : null), [view]);
+  const change = (words: Record<string, string>, without: readonly string[] = []) =>
+    setSearch(
+      (before) =>
+        new URLSearchParams({
+          ...Object.fromEntries([...before].filter(([name]) => !without.includes(name))),
+          ...words,
+        }),
+      { replace: true, preventScrollReset: true },
+    );
   const wide = useMedia('(min-width: 64rem)');
   if (error) {
     return (
@@ -54,14 +67,12 @@ export function MatchesPage() {
       </PageHeading>
       <Sentence
         view={view}
-        onChange={(change) =>
-          setSearch((before) => new URLSearchParams({ ...Object.fromEntries(before), ...change }), {
-            replace: true,
-          })
-        }
+        // A new sentence is read from its top again.
+        onChange={(words) => change(words, ['limit'])}
       />
       <chakra.p role="status" srOnly>
-        {view.rows.length} shocks shown{view.leftOut > 0 ? `, ${view.leftOut} left out` : ''}
+        {view.rows.length} shocks shown{view.more > 0 ? `, ${view.more} more below` : ''}
+        {view.leftOut > 0 ? `, ${view.leftOut} left out` : ''}
       </chakra.p>
       <chakra.div aria-busy={isPlaceholderData} opacity={isPlaceholderData ? '0.6' : '1'}>
         {sheet ? (
@@ -82,6 +93,17 @@ export function MatchesPage() {
           </Notice>
         )}
       </chakra.div>
+      {view.more > 0 ? (
+        <chakra.div marginTop="6">
+          <Button
+            tone="plain"
+            busy={isPlaceholderData && 'Fetching more'}
+            onClick={() => change({ limit: String(view.rows.length + step) })}
+          >
+            Show {Math.min(step, view.more)} more of {view.more}
+          </Button>
+        </chakra.div>
+      ) : null}
       <chakra.p marginTop="8" color="slate" maxWidth="line">
         {view.leftOut > 0 && sheet ? `${view.leftOut} more are left out by spring, reservoir or price. ` : ''}
         Something wrong? <TextLink to={`/measure-up/${id}/check`}>Change your answers</TextLink>. Our figures
