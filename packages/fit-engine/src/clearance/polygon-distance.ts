@@ -5,7 +5,10 @@ export type Corners = Float64Array;
 
 export const cornersOf = (polygon: readonly Point[]): Corners => {
   const corners = new Float64Array(2 * polygon.length);
-  polygon.forEach(([x, y], i) => corners.set([x, y], 2 * i));
+  polygon.forEach(([x, y], i) => {
+    corners[2 * i] = x;
+    corners[2 * i + 1] = y;
+  });
   return corners;
 };
 
