@@ -78,6 +78,14 @@ export const visits: Record<PagePath, Visit> = {
     `/measure-up/${measureUp}/matches/${shock}`,
     `/measure-up/${measureUp}/matches/${refused}`,
   ]),
+  '/measure-up/:id/matches/:sizeId/curves': about(({ measureUp }) => [
+    `/measure-up/${measureUp}/matches/${shock}/curves?present=hexling-moss-b-210x50`,
+    `/measure-up/${measureUp}/matches/${refused}/curves`,
+  ]),
+  '/measure-up/:id/matches/:sizeId/clearance': about(({ measureUp }) => [
+    `/measure-up/${measureUp}/matches/${refused}/clearance`,
+    `/measure-up/${measureUp}/matches/${shock}/clearance`,
+  ]),
   '/measure-up/:id/:question': about(({ measureUp }) =>
     [...questionKeys, 'check'].map((question) => `/measure-up/${measureUp}/${question}`),
   ),

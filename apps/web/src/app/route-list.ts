@@ -52,6 +52,8 @@ const entries = [
   { path: '/measure-up/open', title: 'Your link', budget: 'measuring' },
   { path: '/measure-up/:id/matches', title: 'Fitting sheet', budget: 'measuring' },
   { path: '/measure-up/:id/matches/:sizeId', title: 'One shock', budget: 'measuring' },
+  { path: '/measure-up/:id/matches/:sizeId/curves', title: 'Curves', budget: 'measuring' },
+  { path: '/measure-up/:id/matches/:sizeId/clearance', title: 'Room in the frame', budget: 'measuring' },
   {
     path: '/measure-up/:id/:question',
     title: 'Measure-up',

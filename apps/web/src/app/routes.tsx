@@ -36,6 +36,10 @@ const pages: Record<PagePath, FetchPage> = {
     import('../features/matches/matches-page').then((module) => module.MatchesPage),
   '/measure-up/:id/matches/:sizeId': () =>
     import('../features/matches/match-page').then((module) => module.MatchPage),
+  '/measure-up/:id/matches/:sizeId/curves': () =>
+    import('../features/curves/curves-page').then((module) => module.CurvesPage),
+  '/measure-up/:id/matches/:sizeId/clearance': () =>
+    import('../features/clearance/clearance-page').then((module) => module.ClearancePage),
   '/measure-up/:id/:question': () =>
     import('../features/measure-up/question-page').then((module) => module.QuestionPage),
   '/plans/:planId': () => import('../features/plans/plan-page').then((module) => module.PlanPage),

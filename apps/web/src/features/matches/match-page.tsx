@@ -100,6 +100,16 @@ export function MatchPage() {
       >
         <ShockDrawing figure={row.drawing} dimensions={['eye-to-eye', 'stroke', 'diameter']} ghost />
       </chakra.div>
+      <chakra.p display="flex" flexWrap="wrap" columnGap="6" marginBottom="4">
+        <TextLink to="curves" display="inline-flex" alignItems="center" minHeight="target">
+          Curves beside your present shock
+        </TextLink>
+        {row.drawing.reservoir ? (
+          <TextLink to="clearance" display="inline-flex" alignItems="center" minHeight="target">
+            The reservoir’s room in the frame
+          </TextLink>
+        ) : null}
+      </chakra.p>
       <chakra.p color="slate" marginBottom="6" maxWidth="line">
         Judged against this entry of the sheet: {data.entryText}.{' '}
         {data.wayRound === 'body-to-frame'
