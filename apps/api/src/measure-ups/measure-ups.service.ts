@@ -27,7 +27,7 @@ import { MeasureUpAnswer } from './measure-up-answer.entity.js';
 import { MeasureUpLink } from './measure-up-link.entity.js';
 import { MeasureUp } from './measure-up.entity.js';
 import { MeasureUpsException } from './measure-ups.exception.js';
-import { contradictsSheet, presentDrawing, sizeResult, sizeView } from './size-view.js';
+import { contradictsSheet, mountFamily, presentDrawing, sizeResult, sizeView } from './size-view.js';
 
 /** A measure-up with all that follows from it. */
 export interface OpenMeasureUp {
@@ -86,7 +86,7 @@ export class MeasureUpsService {
       next: questions.find((question) => question.state === 'open')?.key ?? null,
       title: titleOf(frame, sheet),
       sheet: sheet && sheetView(sheet),
-      size: sizeView(size, sheet),
+      size: sizeView(size, sheet, mountFamily(side)),
       drawing: presentDrawing(side, size),
       readyForMatches: readyForMatches(questions),
     };

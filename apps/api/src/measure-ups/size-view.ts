@@ -28,7 +28,11 @@ export const contradictsSheet = (size: SizeResult, sheet: FrameSheetData | null)
   !sheet.entries.some((entry) => entry.sizeKey === size.sizeKey);
 
 /** What the resolver makes of the readings so far, in words and figures. */
-export function sizeView(size: SizeResult, sheet: FrameSheetData | null): SizeView {
+export function sizeView(
+  size: SizeResult,
+  sheet: FrameSheetData | null,
+  family: SizeView['family'],
+): SizeView {
   const listed = sheet?.entries.map((entry) => entry.sizeKey).join(' and ');
   return {
     state: size.state,
@@ -41,6 +45,7 @@ export function sizeView(size: SizeResult, sheet: FrameSheetData | null): SizeVi
       question: questionOfReading[reading],
       say: `The frame’s maker lists ${listed ?? nearestPublished}; you read ${mm} mm.`,
     })),
+    family,
   };
 }
 

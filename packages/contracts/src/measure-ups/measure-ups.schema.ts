@@ -28,6 +28,8 @@ export const sizeView = z.object({
   /** One sentence for the rider. */
   say: z.string(),
   conflicts: z.array(z.object({ question: questionKey, say: z.string() })),
+  /** The mounts that are known, which rule sizes out: what is typed is read against the same sizes. */
+  family: z.enum(['eyelet', 'trunnion']).nullable(),
 });
 export type SizeView = z.infer<typeof sizeView>;
 

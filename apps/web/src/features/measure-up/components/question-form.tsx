@@ -80,7 +80,7 @@ export function QuestionForm({ view, questionKey }: { view: MeasureUpView; quest
               onChange={form.change}
             />
           ))}
-          <SizeSays view={view} questionKey={questionKey} />
+          <SizeSays view={view} questionKey={questionKey} raw={form.raw} />
           <chakra.div display="flex" flexWrap="wrap" columnGap="3" rowGap="1" marginTop="6">
             <Button type="submit" size="large" busy={answer.isPending && 'Saving'}>
               Continue
