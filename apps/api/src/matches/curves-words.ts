@@ -64,7 +64,7 @@ export function assumedIn(load: RiderLoad | null, drawn: readonly (Drawn | null)
     load &&
       `60 % of the weight stands on the rear wheel, and the suspension carries 60 % of the bike’s mass: ${plainNumber(load.loadN / g0, 0)} kg on the wheel.`,
     sides.some(({ spring }) => spring?.kind === 'air') &&
-      'An air spring settles slowly to the sag and is drawn as it answers quick movements from there (gas exponent 1.35).',
+      'An air spring settles slowly to the sag and is drawn as it answers quick movements from there (gas exponent 1.35); near the top its negative chamber may then pull a little.',
     coils.length > 0 &&
       `A coil is drawn with one turn of preload, ${[...new Set(coils.map(({ preloadMm }) => plainNumber(preloadMm, 1)))].join(' and ')} mm.`,
     worked && 'Where a coil’s rate is not known, the rate that gives the sag aimed at is drawn.',

@@ -4,6 +4,7 @@ import { DrawingFrame } from '../../components/drawing/drawing-frame';
 import { circle, line, outline } from '../../components/drawing/primitives';
 import { Shapes } from '../../components/drawing/shape-view';
 import { boxAround, type Box, type Shape } from '../../components/drawing/shapes';
+import { middleOf, seenIn } from './visible';
 import { formatFigure } from '../../lib/format-figure';
 
 export type SweptPosition = ClearanceView['positions'][number];
@@ -12,7 +13,8 @@ type Instant = SweptPosition['instants'][number];
 
 /** The frame's plane has y upwards, the screen downwards. */
 const flip = ([x, y]: Point): Point => [x, -y];
-const marginMm = 34;
+const aroundMm = 74;
+const edgeMm = 10;
 const eyeMm = 8;
 const unscaled: CSSProperties = { transform: 'scale(var(--drawing-px, 0.8))' };
 const halo = {
@@ -37,29 +39,27 @@ function axisOf({ frameEye, linkEye }: Instant): Shape[] {
   ];
 }
 
-/** What is shown: the shock in all its places with some of the frame around it. */
-function boxOf({ instants }: SweptPosition): Box {
-  const box = boxAround(
-    instants.flatMap((one) => [bodyOf(one).box, ...axisOf(one).map((shape) => shape.box)]),
+/** What is shown: the shock in all its places with as much of the frame as lies about it. */
+function boxOf({ instants }: SweptPosition, fixed: ClearanceView['fixed']): Box {
+  const shock = boxAround(
+    instants.flatMap((one) => [...[bodyOf(one), ...axisOf(one), ...partsOf(one)].map(({ box }) => box)]),
   );
+  const all = boxAround([shock, ...fixed.map(({ polygon }) => outline('', polygon.map(flip)).box)]);
   return {
-    x1: box.x1 - marginMm,
-    y1: box.y1 - marginMm,
-    x2: box.x2 + marginMm,
-    y2: box.y2 + marginMm,
+    x1: Math.max(shock.x1 - aroundMm, all.x1 - edgeMm),
+    y1: Math.max(shock.y1 - aroundMm, all.y1 - edgeMm),
+    x2: Math.min(shock.x2 + aroundMm, all.x2 + edgeMm),
+    y2: Math.min(shock.y2 + aroundMm, all.y2 + edgeMm),
   };
 }
 
-/** A place inside the box for the name of a part: the middle of what is seen of it. */
-function labelAt(polygon: readonly Point[], box: Box): Point {
-  const held = polygon
-    .map(flip)
-    .map(([x, y]): Point => [
-      Math.min(box.x2 - 26, Math.max(box.x1 + 26, x)),
-      Math.min(box.y2 - 8, Math.max(box.y1 + 12, y)),
-    ]);
-  const sum = held.reduce(([sx, sy], [x, y]) => [sx + x, sy + y], [0, 0]);
-  return [sum[0] / held.length, sum[1] / held.length];
+/** Where the name of a part stands: in the middle of what is seen of it, a moving part's above it. */
+function labelAt(polygon: readonly Point[], box: Box, moving: boolean): Point | null {
+  const inner = { x1: box.x1 + 8, y1: box.y1 + 4, x2: box.x2 - 8, y2: box.y2 - 4 };
+  const seen = seenIn(polygon.map(flip), inner);
+  if (seen.length === 0) return null;
+  const [x, y] = middleOf(seen);
+  return moving ? [x, Math.min(...seen.map(([, top]) => top)) - 5] : [x, y + 3];
 }
 
 /** In words what the drawing shows. */
@@ -76,10 +76,13 @@ export interface SweepDrawingProps {
 /** The shock at several points of its stroke among the frame's outlines, the tightest point with its figure. */
 export function SweepDrawing({ view, position }: SweepDrawingProps) {
   const { instants, atShockMm, tight, distanceMm } = position;
-  const box = boxOf(position);
+  const box = boxOf(position, view.fixed);
   const tightest = instants.find(({ shockMm }) => shockMm === atShockMm) ?? instants[0];
   const others = instants.filter((one) => one !== tightest);
-  const named = [...view.fixed, ...(tightest?.moving ?? [])];
+  const named = [
+    ...view.fixed.map((part) => ({ ...part, moving: false })),
+    ...(tightest?.moving ?? []).map((part) => ({ ...part, moving: true })),
+  ];
   return (
     <DrawingFrame
       box={box}
@@ -100,8 +103,10 @@ export function SweepDrawing({ view, position }: SweepDrawingProps) {
           <Shapes shapes={axisOf(tightest)} />
         </>
       ) : null}
-      {named.map(({ name, polygon }) => {
-        const [x, y] = labelAt(polygon, box);
+      {named.map(({ name, polygon, moving }) => {
+        const at = labelAt(polygon, box, moving);
+        if (!at) return null;
+        const [x, y] = at;
         return (
           <g key={name} transform={`translate(${x} ${y})`}>
             <text
@@ -115,32 +120,39 @@ export function SweepDrawing({ view, position }: SweepDrawingProps) {
           </g>
         );
       })}
-      {tight ? <Tight from={flip(tight.shock)} to={flip(tight.part)} mm={distanceMm} box={box} /> : null}
+      {tight ? <Tight from={flip(tight.shock)} to={flip(tight.part)} mm={distanceMm} /> : null}
     </DrawingFrame>
   );
 }
 
-/** A ring around the tightest point and its figure on a leader that runs away from the shock. */
-function Tight({ from, to, mm, box }: { from: Point; to: Point; mm: number; box: Box }) {
+/** The gap with a dot at either end, ringed where it is too small to be seen, its figure beside it. */
+function Tight({ from, to, mm }: { from: Point; to: Point; mm: number }) {
   const colour = 'var(--lf-colors-bracken)';
   const middle: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
-  const side = middle[0] > (box.x1 + box.x2) / 2 ? -1 : 1;
-  const up = middle[1] > (box.y1 + box.y2) / 2 ? -1 : 1;
-  const radius = Math.hypot(to[0] - from[0], to[1] - from[1]) / 2 + 4;
-  const start: Point = [middle[0] + side * radius * 0.7, middle[1] + up * radius * 0.7];
-  const end: Point = [start[0] + side * 16, start[1] + up * 16];
+  const gap = Math.hypot(to[0] - from[0], to[1] - from[1]);
+  const radius = gap < 14 ? gap / 2 + 5 : 0;
+  // The figure goes to the side that runs along the gap's own right angle, upright and clear of ring or line.
+  const along: Point = gap === 0 ? [0, 1] : [(to[0] - from[0]) / gap, (to[1] - from[1]) / gap];
+  const side = along[1] >= 0 ? 1 : -1;
+  const off = radius + 4;
+  const text: Point = [middle[0] + side * along[1] * off, middle[1] - side * along[0] * off];
   return (
     <g data-tight={mm} stroke={colour} fill="none">
-      <circle cx={middle[0]} cy={middle[1]} r={radius} strokeWidth={2} vectorEffect="non-scaling-stroke" />
       <path
-        d={`M${from[0]} ${from[1]}L${to[0]} ${to[1]}M${start[0]} ${start[1]}L${end[0]} ${end[1]}`}
-        strokeWidth={1.4}
+        d={`M${from[0]} ${from[1]}L${to[0]} ${to[1]}`}
+        strokeWidth={2}
         vectorEffect="non-scaling-stroke"
       />
-      <g transform={`translate(${end[0] + side * 2} ${end[1] + up * 2})`}>
+      {[from, to].map(([x, y], index) => (
+        <circle key={index} cx={x} cy={y} r={1.6} fill={colour} stroke="none" />
+      ))}
+      {radius > 0 ? (
+        <circle cx={middle[0]} cy={middle[1]} r={radius} strokeWidth={2} vectorEffect="non-scaling-stroke" />
+      ) : null}
+      <g transform={`translate(${text[0]} ${text[1]})`}>
         <text
-          textAnchor={side > 0 ? 'start' : 'end'}
-          dominantBaseline="central"
+          textAnchor={Math.abs(along[1]) < 0.4 ? 'middle' : 'start'}
+          dominantBaseline={Math.abs(along[1]) < 0.4 ? 'auto' : 'central'}
           fill={colour}
           style={{ ...unscaled, fontSize: '19px', fontWeight: 800, fontVariantNumeric: 'tabular-nums' }}
           {...halo}

@@ -28,7 +28,7 @@ export interface LineChartProps {
 const [width, height, left, right, top, bottom] = [400, 272, 46, 62, 30, 44];
 const small: CSSProperties = { fontSize: '13px', fontWeight: 600, fontVariantNumeric: 'tabular-nums' };
 const slate = 'var(--lf-colors-slate)';
-/** The new one in bracken and full, the present one in slate and dashed: told apart without colour too. */
+/** The new one in bracken and full, the present one in tarn and dashed: told apart without colour too. */
 const looks: Record<Who, { colour: string; dash: string | undefined }> = {
   next: { colour: 'var(--lf-colors-bracken)', dash: undefined },
   present: { colour: 'var(--lf-colors-tarn)', dash: '7 4' },
@@ -73,7 +73,7 @@ export function LineChart(props: LineChartProps) {
             x2={x(end)}
             y1={y(tick)}
             y2={y(tick)}
-            stroke={tick === yAxis.from ? slate : 'var(--lf-colors-hair)'}
+            stroke={tick === yAxis.ticks[0] ? slate : 'var(--lf-colors-hair)'}
             strokeWidth={1}
           />
           <text x={left - 7} y={y(tick) + 4.5} textAnchor="end" fill={slate} style={small}>
@@ -116,7 +116,7 @@ export function LineChart(props: LineChartProps) {
             strokeWidth={1}
             strokeDasharray="13 3 2 3"
           />
-          <text x={x(end)} y={y(level.at) + 15} textAnchor="end" fill={slate} style={small}>
+          <text x={x(end)} y={y(level.at) + 16} textAnchor="end" fill={slate} style={small}>
             {level.label}
           </text>
         </g>

@@ -16,10 +16,13 @@ export function axisFor(values: readonly number[], fromZero: boolean, count = 4)
   const low = fromZero ? Math.min(0, ...values) : Math.min(...values);
   const high = Math.max(...values);
   const step = stepOf(high - low || Math.abs(high) * 0.2 || 1, count);
-  const from = Math.floor(low / step + 1e-9) * step;
-  const to = Math.max(Math.ceil(high / step - 1e-9) * step, from + step);
-  const ticks = Array.from({ length: Math.round((to - from) / step) + 1 }, (_, i) =>
-    Number((from + i * step).toFixed(6)),
+  // A little below nothing is not worth a whole step.
+  const slight = fromZero && low < 0 && -low < 0.4 * step;
+  const from = slight ? low : Math.floor(low / step + 1e-9) * step;
+  const to = Math.max(Math.ceil(high / step - 1e-9) * step, (slight ? 0 : from) + step);
+  const first = slight ? 0 : from;
+  const ticks = Array.from({ length: Math.round((to - first) / step) + 1 }, (_, i) =>
+    Number((first + i * step).toFixed(6)),
   );
   return { from, to, ticks };
 }
