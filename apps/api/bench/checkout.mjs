@@ -29,8 +29,11 @@ async function buy(url, { id, cookie }) {
     if (!answer.ok) throw new Error(`${method} ${path}: ${answer.status} ${await answer.text()}`);
     return answer.json();
   };
-  const { rows } = await ask('GET', `/api/measure-ups/${id}/matches?maxMinor=1000000`);
-  const row = rows.find(({ price }) => price.selfFitMinor !== null);
+  const { rows } = await ask('GET', `/api/measure-ups/${id}/matches?maxMinor=1000000&limit=20`);
+  const row = rows.find(
+    ({ price, verdict }) =>
+      price.selfFitMinor !== null && ['bolts-straight-in', 'fits-with-work'].includes(verdict),
+  );
   if (!row) return null;
   const plan = await ask('POST', `/api/measure-ups/${id}/plans`, { sizeId: row.sizeId });
   const { totalMinor } = await ask(

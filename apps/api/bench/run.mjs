@@ -9,6 +9,7 @@ import { benchCheckout } from './checkout.mjs';
 import { counted, fillFrames, fillListings, fillSizes } from './fill.mjs';
 import { quantile, underLoad } from './load.mjs';
 import { drawRiders } from './riders.mjs';
+import { apiMemory } from '../../../packages/launcher/src/servers.mjs';
 import { fromHere, startServer } from './servers.mjs';
 
 const needed = (name) => {
@@ -77,7 +78,8 @@ async function judgedFor(startApi, riders) {
 }
 
 async function bench(client, databaseUrl, stripeUrl) {
-  const startApi = () => startServer('../dist/main.js', '/health/ready', apiSettings(databaseUrl, stripeUrl));
+  const startApi = () =>
+    startServer('../dist/main.js', '/health/ready', apiSettings(databaseUrl, stripeUrl), apiMemory);
   console.log(`\nThe API under load (${cpus().length} cores of ${cpus()[0]?.model ?? 'an unknown kind'})`);
   await fillFrames(client, size.sheets);
   await fillSizes(client, size.sizes);
@@ -118,6 +120,7 @@ async function bench(client, databaseUrl, stripeUrl) {
   console.log(`  memory          ${withMany.mostMb} MB resident at most (aim: below 300)`);
 
   const api = await startServer('../dist/main.js', '/health/ready', apiSettings(databaseUrl, stripeUrl), [
+    ...apiMemory,
     '--import',
     fromHere('watch-transactions.mjs'),
   ]);

@@ -100,5 +100,30 @@ export function screenAll(
   return shocks.map((shock) => screen.refusal(shock) ?? judgementOf(screen.outcome(shock)));
 }
 
+/** A catalogue gone through for those that may fit. */
+export interface Sifted<S extends ShockFacts> {
+  /** Judged as `judge` does it; among them those that the costly check alone refuses. */
+  judged: { shock: S; judgement: Judgement }[];
+  /** Those that a cheap check refuses. */
+  refused: S[];
+}
+
+/**
+ * The same as `screenAll` where nobody asks what refuses the many that do not fit.
+ * @throws RangeError for a frame without entries
+ */
+export function sift<S extends ShockFacts>(
+  base: Omit<FitQuestion, 'shock'>,
+  shocks: readonly S[],
+): Sifted<S> {
+  const screen = screenOf(base);
+  const sifted: Sifted<S> = { judged: [], refused: [] };
+  for (const shock of shocks) {
+    if (screen.refuses(shock)) sifted.refused.push(shock);
+    else sifted.judged.push({ shock, judgement: judgementOf(screen.outcome(shock)) });
+  }
+  return sifted;
+}
+
 /** Whether a shock that was gone through has its judgement, with answers and figures. */
 export const isJudged = (one: Judgement | Refusal): one is Judgement => 'answers' in one;

@@ -1,7 +1,7 @@
 import { rmSync } from 'node:fs';
 import { inLocal } from './paths.mjs';
 import { freePort } from './ports.mjs';
-import { startServer, untilItAnswers, untilItSaysReady } from './servers.mjs';
+import { apiMemory, startServer, untilItAnswers, untilItSaysReady } from './servers.mjs';
 import { apiEnvironment, standIns } from './settings.mjs';
 import { step } from './steps.mjs';
 
@@ -67,7 +67,7 @@ export async function startStandIns(secrets, apiPort) {
 export const startApi = (made) =>
   step('Linkfell', async () => {
     const env = { ...process.env, ...apiEnvironment(process.env, made) };
-    const server = startServer('api', 'apps/api/dist/main.js', env);
+    const server = startServer('api', 'apps/api/dist/main.js', env, { node: apiMemory });
     await untilItAnswers(server, `http://127.0.0.1:${env.PORT}/health/ready`);
     return `ready on port ${env.PORT}`;
   });

@@ -16,10 +16,13 @@ interface Row {
   listing_id: string;
   item_id: string;
   shop_id: string;
-  shop_name: string;
   price_minor: number;
   available: number;
   lead_days: number;
+}
+interface Shop {
+  id: string;
+  name: string;
   carriage_minor: number;
   carrier_days: number;
   vat_rate_bp: number;
@@ -34,7 +37,7 @@ export class OffersService {
   constructor(private readonly dataSource: DataSource) {}
 
   /**
-   * Every listing of these items with at least one unit free, cheapest first, in one statement.
+   * Every listing of these items with at least one unit free, cheapest first, in two statements.
    * @param perItem only that many of the cheapest of each item
    */
   async forItems(
@@ -44,36 +47,49 @@ export class OffersService {
   ): Promise<ShopOffer[]> {
     if (itemIds.length === 0) return [];
     const rows: Row[] = await manager.query(
-      `SELECT l.id AS listing_id, l.item_id, l.shop_id, o.name AS shop_name, l.price_minor,
-              l.quantity - l.reserved AS available, l.lead_days, o.carriage_minor, o.carrier_days,
-              o.vat_rate_bp, o.time_zone, o.dispatch_cutoff, o.dispatch_weekdays
+      `SELECT l.id AS listing_id, l.item_id, l.shop_id, l.price_minor, l.quantity - l.reserved AS available,
+              l.lead_days
          FROM unnest($1::text[]) AS wanted(item_id)
         CROSS JOIN LATERAL (
               SELECT * FROM listings
                WHERE listings.item_id = wanted.item_id AND quantity > reserved
                ORDER BY price_minor, id LIMIT $2) l
-         JOIN organisations o ON o.id = l.shop_id
         ORDER BY l.item_id, l.price_minor, l.id`,
       [[...new Set(itemIds)], perItem],
     );
-    return rows.map(toOffer);
+    const shops: Shop[] = await manager.query(
+      `SELECT id, name, carriage_minor, carrier_days, vat_rate_bp, time_zone, dispatch_cutoff, dispatch_weekdays
+         FROM organisations WHERE id = ANY($1)`,
+      [[...new Set(rows.map(({ shop_id }) => shop_id))]],
+    );
+    const shopOf = new Map(shops.map((shop) => [shop.id, shopFacts(shop)]));
+    return rows.flatMap((row) => {
+      const shop = shopOf.get(row.shop_id);
+      return shop ? [toOffer(row, shop)] : [];
+    });
   }
 }
 
-const toOffer = (row: Row): ShopOffer => ({
+type ShopFacts = Pick<ShopOffer, 'shopName' | 'carriageMinor' | 'vatRateBp' | 'dispatch'>;
+
+const shopFacts = (shop: Shop): ShopFacts => ({
+  shopName: shop.name,
+  carriageMinor: shop.carriage_minor,
+  vatRateBp: shop.vat_rate_bp,
+  dispatch: {
+    timeZone: shop.time_zone,
+    cutoff: shop.dispatch_cutoff,
+    weekdays: shop.dispatch_weekdays,
+    carrierDays: shop.carrier_days,
+  },
+});
+
+const toOffer = (row: Row, shop: ShopFacts): ShopOffer => ({
   listingId: row.listing_id,
   itemId: row.item_id,
   shopId: row.shop_id,
-  shopName: row.shop_name,
   priceMinor: row.price_minor,
   available: row.available,
   leadDays: row.lead_days,
-  carriageMinor: row.carriage_minor,
-  vatRateBp: row.vat_rate_bp,
-  dispatch: {
-    timeZone: row.time_zone,
-    cutoff: row.dispatch_cutoff,
-    weekdays: row.dispatch_weekdays,
-    carrierDays: row.carrier_days,
-  },
+  ...shop,
 });

@@ -1,9 +1,8 @@
 import type { WorkId } from '@linkfell/contracts';
 import {
-  isJudged,
   judge,
   judgeAll,
-  screenAll,
+  sift,
   type FitQuestion,
   type Judgement,
   type SheetEntry,
@@ -58,18 +57,13 @@ export class JudgingService {
     const open = await this.ready(measureUpId);
     const { shocks, parts } = await this.catalogue.snapshot();
     const base = { ...open.side, sale: parts };
-    const judged: Judged[] = [];
-    const refused: ShockFacts[] = [];
-    screenAll(base, shocks).forEach((one, i) => {
-      const shock = shocks[i] as ShockFacts;
-      if (isJudged(one)) judged.push(withEntry(open, shock, one));
-      else refused.push(shock);
-    });
+    const sifted = sift(base, shocks);
+    const judged = sifted.judged.map(({ shock, judgement }) => withEntry(open, shock, judgement));
     const judgeRefused = (some: readonly ShockFacts[]): Judged[] =>
       some.length === 0
         ? []
         : judgeAll(base, some).map((judgement, i) => withEntry(open, some[i] as ShockFacts, judgement));
-    return { open, judged, refused, judgeRefused };
+    return { open, judged, refused: sifted.refused, judgeRefused };
   }
 
   /** @throws CommonException "not-found" for a size that is in no catalogue */

@@ -5,9 +5,9 @@ import { Clock } from '../common/clock.js';
 import { OffersService, type ShopOffer } from '../listings/offers.service.js';
 import { greatCircleKm, type Place } from '../workshops/great-circle.js';
 import { WorkshopsService, type WorkshopDay } from '../workshops/workshops.service.js';
-import { dayOf } from './planning/calendar.js';
 import { chooseOffers, type NeededItem } from './planning/choose-offers.js';
-import { jobAt, slotsAfterParts } from './planning/job-cost.js';
+import { FirstDays } from './planning/first-days.js';
+import { jobAt } from './planning/job-cost.js';
 
 export interface CostRequest {
   key: string;
@@ -53,7 +53,7 @@ export class FitCostService {
       this.workshops.days(now),
     ]);
     const byItem = byItemId(offers);
-    const firstDays = new Map<string, string | null>();
+    const firstDays = new FirstDays(now);
     return new Map(
       requests.map((request) => {
         const basket = chooseOffers(
@@ -61,7 +61,7 @@ export class FitCostService {
           request.items.flatMap((item) => byItem.get(item.itemId) ?? []),
         );
         if (!basket) return [request.key, none];
-        const fitted = this.cheapestFitting(now, request.work, basket.offers, workshops, place, firstDays);
+        const fitted = this.cheapestFitting(request.work, basket.offers, workshops, place, firstDays);
         return [
           request.key,
           {
@@ -77,12 +77,11 @@ export class FitCostService {
 
   /** The cheapest workshop with a free slot; of equal ones the earlier, then the nearer. */
   private cheapestFitting(
-    now: Date,
     work: readonly WorkId[],
     offers: readonly ShopOffer[],
     workshops: readonly WorkshopDay[],
     place: Place | null,
-    firstDays: Map<string, string | null>,
+    firstDays: FirstDays,
   ): { priceMinor: number; earliest: FitCost['earliest'] } | null {
     const candidates = workshops
       .flatMap((workshop) => {
@@ -91,18 +90,7 @@ export class FitCostService {
       })
       .sort((a, b) => a.priceMinor - b.priceMinor || (a.distanceKm ?? 0) - (b.distanceKm ?? 0));
     for (const { workshop, minutes, priceMinor, distanceKm } of candidates) {
-      // Many shocks come from the same shops with the same lead: their first day is worked out once.
-      const sources = offers
-        .map((offer) => `${offer.shopId}:${offer.leadDays}`)
-        .sort()
-        .join();
-      const key = `${workshop.id} ${minutes} ${sources}`;
-      let day = firstDays.get(key);
-      if (day === undefined) {
-        const first = slotsAfterParts(now, workshop, offers, minutes, 1).slots[0];
-        day = first ? dayOf(first.start, workshop.calendar.timeZone).toString() : null;
-        firstDays.set(key, day);
-      }
+      const day = firstDays.firstDay(workshop, offers, minutes);
       if (day) return { priceMinor, earliest: { day, workshopName: workshop.name, distanceKm } };
     }
     return null;

@@ -21,10 +21,17 @@ export interface CatalogueSnapshot {
 /** What is on sale may be this old when matches are judged; prices and stock are read anew each time. */
 const keepForMs = 2000;
 
+interface KeptFacts {
+  version: string;
+  facts: ShockFacts;
+}
+
 /** Which shock sizes and parts are on sale, with the facts that the engine reads. */
 @Injectable()
 export class CatalogueService {
   private kept: { at: number; snapshot: Promise<CatalogueSnapshot> } | null = null;
+  /** Facts by size as last read, each with the versions of the rows it was made of. */
+  private facts = new Map<string, KeptFacts>();
 
   constructor(private readonly dataSource: DataSource) {}
 
@@ -51,7 +58,7 @@ export class CatalogueService {
   private async read(): Promise<CatalogueSnapshot> {
     const onSale = `EXISTS (SELECT 1 FROM listings l WHERE l.item_id = i.id AND l.quantity > l.reserved)`;
     const [shocks, kits, coils, remotes, others, names] = await Promise.all([
-      this.shocks(`WHERE ${onSale}`, []),
+      this.onSale(onSale),
       this.dataSource.query<KitOnSale[]>(
         `SELECT i.id, i.name, k.bore_mm AS "boreMm", k.width_mm AS "widthMm", k.bolt_mm AS "boltMm"
            FROM hardware_kits k JOIN catalogue_items i ON i.id = k.item_id WHERE ${onSale} ORDER BY i.id`,
@@ -84,6 +91,32 @@ export class CatalogueService {
       },
       names: new Map(names.map(({ id, name }) => [id, name])),
     };
+  }
+
+  /**
+   * The sizes on sale. Only rows that are new or have changed are read whole; a size that is as it was stays the same
+   * object, so that what the engine has kept about it stays true.
+   */
+  private async onSale(condition: string): Promise<ShockFacts[]> {
+    const rows = await this.dataSource.query<{ id: string; version: string }[]>(
+      `SELECT z.item_id AS id, concat_ws(' ', z.xmin, o.xmin, m.xmin) AS version
+         FROM shock_sizes z JOIN catalogue_items i ON i.id = z.item_id
+         JOIN shock_models o ON o.id = z.model_id JOIN makers m ON m.id = o.maker_id
+        WHERE ${condition} ORDER BY z.item_id`,
+    );
+    const changed = rows.filter(({ id, version }) => this.facts.get(id)?.version !== version);
+    const read =
+      changed.length === 0
+        ? []
+        : await this.shocks('WHERE z.item_id = ANY($1)', [changed.map(({ id }) => id)]);
+    const fresh = new Map(read.map((facts) => [facts.sizeId, facts]));
+    const next = new Map<string, KeptFacts>();
+    for (const { id, version } of rows) {
+      const facts = fresh.get(id) ?? this.facts.get(id)?.facts;
+      if (facts) next.set(id, { version, facts });
+    }
+    this.facts = next;
+    return [...next.values()].map(({ facts }) => facts);
   }
 
   private async shocks(where: string, parameters: unknown[]): Promise<ShockFacts[]> {

@@ -5,9 +5,9 @@ import { pressureCode, pressureKind, type PressureCode } from '../rules/pressure
 import { rideOf, type RideResult } from '../rules/ride.js';
 import { checks, ways } from '../rules/run-trial.js';
 import { sizeChecks } from '../rules/size.js';
-import { Kept } from './kept.js';
-import { costOf, lightOf, type Light } from './light.js';
-import { shelvesFor, type Per } from './shelves.js';
+import { Facets } from './facets.js';
+import { costOf, failCost, lightOf, type Light } from './light.js';
+import { keyPath, shelvesFor, type Per } from './shelves.js';
 
 /** What checks of one shelf say of a shock in one entry, one way round, with the sum of their costs. */
 export interface Lights {
@@ -34,6 +34,23 @@ function pressureLight(code: PressureCode): Lights {
   return made;
 }
 
+/** The shelves where each entry tells its size and where one does not, with the facets of all shocks seen so far. */
+const [unsized, sized] = [false, true].map((known) => {
+  const shelves = shelvesFor(known);
+  return {
+    shelves,
+    facets: new Facets([...shelves.map(({ path }) => path), keyPath]),
+    // After this one of the shelves the pressure is shown.
+    beforePressure: shelves.findIndex(({ checks: ids }) => ids.includes('spring-rate')),
+  };
+}) as [House, House];
+
+interface House {
+  shelves: ReturnType<typeof shelvesFor>;
+  facets: Facets;
+  beforePressure: number;
+}
+
 /** Eye-to-eye and stroke come of one comparison. */
 const read = (ids: readonly CheckId[], trial: Trial): Light[] =>
   ids[0] === 'eye-to-eye' ? sizeChecks(trial).map(lightOf) : ids.map((id) => lightOf(checks[id](trial)));
@@ -47,8 +64,12 @@ export class LightChecks {
   readonly places: number;
   /** After this one of the shelves the pressure is shown. */
   readonly beforePressure: number;
-  private readonly kept;
-  private readonly rides = new Kept<readonly RideResult[]>();
+  private readonly house: House;
+  /** By shelf, then by facet. */
+  private readonly kept: ByPlace[][];
+  /** By shelf, then by facet: whether every place fails. */
+  private readonly dead: boolean[][];
+  private readonly rides: (readonly RideResult[])[] = [];
 
   constructor(
     private readonly base: Omit<FitQuestion, 'shock'>,
@@ -56,8 +77,10 @@ export class LightChecks {
     private readonly entries: readonly SheetEntry[],
   ) {
     this.places = entries.length * ways.length;
-    this.kept = shelvesFor(entries).map((shelf) => ({ ...shelf, all: new Kept<ByPlace>() }));
-    this.beforePressure = this.kept.findIndex(({ checks: ids }) => ids.includes('spring-rate'));
+    this.house = entries.every(({ sizeKey }) => sizeKey !== null) ? sized : unsized;
+    this.kept = this.house.shelves.map(() => []);
+    this.dead = this.house.shelves.map(() => []);
+    this.beforePressure = this.house.beforePressure;
   }
 
   trialAt(shock: ShockFacts, place: number): Trial {
@@ -67,13 +90,34 @@ export class LightChecks {
     return { frame, present, rider, sale, shock, shared: this.shared, entry, wayRound, full: false };
   }
 
+  /** Whether one shelf by itself refuses the shock in every entry and either way round: most are, by their size. */
+  refusedByOne(shock: ShockFacts): boolean {
+    const { facets, shelves } = this.house;
+    const numbers = facets.of(shock);
+    for (let i = 0; i < shelves.length; i += 1) {
+      const number = numbers[i] as number;
+      const dead = this.dead[i] as boolean[];
+      const known = (dead[number] ??= this.lights(shock, i, number).every(({ cost }) => cost >= failCost));
+      if (known) return true;
+    }
+    return false;
+  }
+
   /** Puts the lights of every shelf, in the order in which checks are shown, into `row`. */
   fill(shock: ShockFacts, row: ByPlace[]): void {
-    for (let i = 0; i < this.kept.length; i += 1) {
-      const { all, path, per, checks: ids } = this.kept[i] as (typeof this.kept)[number];
-      const kept = path(all, shock);
-      row[i] = kept.value ??= this.ask(shock, per, ids);
+    const { facets, shelves } = this.house;
+    const numbers = facets.of(shock);
+    for (let i = 0; i < shelves.length; i += 1) {
+      row[i] = this.lights(shock, i, numbers[i] as number);
     }
+  }
+
+  private lights(shock: ShockFacts, shelf: number, facet: number): ByPlace {
+    const kept = this.kept[shelf] as ByPlace[];
+    const found = kept[facet];
+    if (found) return found;
+    const { per, checks: ids } = this.house.shelves[shelf] as House['shelves'][number];
+    return (kept[facet] = this.ask(shock, per, ids));
   }
 
   private ask(shock: ShockFacts, per: Per, ids: readonly CheckId[]): ByPlace {
@@ -89,9 +133,11 @@ export class LightChecks {
   pressure(shock: ShockFacts, entry: number): Lights {
     const { spring } = shock;
     if (spring.kind !== 'air') return nothing;
-    const kept = this.rides.at(shock.sizeKey);
-    kept.value ??= this.entries.map((_, i) => rideOf(this.trialAt(shock, i * ways.length)));
-    const found = kept.value[entry] as RideResult;
+    const number = this.house.facets.of(shock).at(-1) as number;
+    const rides = (this.rides[number] ??= this.entries.map((_, i) =>
+      rideOf(this.trialAt(shock, i * ways.length)),
+    ));
+    const found = rides[entry] as RideResult;
     if ('ride' in found) return pressureLight(pressureCode(shock, spring, found.ride));
     return together([lightOf(checks.pressure(this.trialAt(shock, entry * ways.length)))]);
   }

@@ -32,6 +32,11 @@ export class Screen {
     this.order = Array.from({ length: this.checks.places }, (_, place) => place).sort(compare);
   }
 
+  /** Whether a cheap check refuses a shock in every way, without saying which. */
+  refuses(shock: ShockFacts): boolean {
+    return this.checks.refusedByOne(shock) || (this.costs[this.cheapest(shock)] as number) >= failCost;
+  }
+
   /** The refusal of a shock that a cheap check refuses in every way; null for one that may fit. */
   refusal(shock: ShockFacts): Refusal | null {
     const place = this.cheapest(shock);

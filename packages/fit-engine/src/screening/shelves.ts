@@ -1,5 +1,5 @@
 import type { CheckId } from '../answers.js';
-import type { SheetEntry, ShockFacts, ShockMount } from '../facts.js';
+import type { ShockFacts, ShockMount } from '../facts.js';
 import type { Kept } from './kept.js';
 
 /** Steps along the figures of a shock to where an answer is kept; the same figures always lead to the same place. */
@@ -57,12 +57,12 @@ interface Shelf {
  * The cheap checks in the order in which they are shown, those of one path together: every fact of the shock that a
  * check reads (`factsRead`) is a step of its path. The pressure is not among them; it is shown after "spring-rate".
  */
-export const shelvesFor = (entries: readonly SheetEntry[]): readonly Shelf[] => [
+export const shelvesFor = (sized: boolean): readonly Shelf[] => [
   { checks: ['eye-to-eye', 'stroke'], per: 'entry', path: sizePath },
   { checks: ['mounts', 'hardware'], per: 'way', path: endsPath },
   { checks: ['spring-type'], per: 'bike', path: springPath },
   { checks: ['coil-on-yoke'], per: 'entry', path: springPath },
-  { checks: ['spring-rate'], per: 'entry', path: coilPath(entries.every(({ sizeKey }) => sizeKey !== null)) },
+  { checks: ['spring-rate'], per: 'entry', path: coilPath(sized) },
   { checks: ['rider-weight'], per: 'bike', path: limitPath },
   { checks: ['diameter'], per: 'bike', path: diameterPath },
   { checks: ['remote'], per: 'bike', path: remotePath },
@@ -75,3 +75,6 @@ export const shelvesFor = (entries: readonly SheetEntry[]): readonly Shelf[] => 
   { checks: ['notices'], per: 'bike', path: noticesPath },
   { checks: ['reading-conflict'], per: 'bike', path: (kept) => kept },
 ];
+
+/** The size by itself, on which the ride of a shock depends in one entry. */
+export const keyPath: Path = (kept, { sizeKey }) => kept.at(sizeKey);

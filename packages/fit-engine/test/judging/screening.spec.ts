@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 
 import { checkIds, type CheckId, type Judgement, type Refusal } from '../../src/answers.js';
 import type { FitQuestion, ShockFacts } from '../../src/facts.js';
-import { isJudged, judge, judgeAll, screenAll } from '../../src/judge.js';
+import { isJudged, judge, judgeAll, screenAll, sift } from '../../src/judge.js';
 import { aQuestion } from './questions.js';
 import { randomQuestion } from './random-question.js';
 import { seeded, type Random } from './seeded.js';
@@ -28,6 +28,10 @@ function compare(base: FitQuestion, shocks: readonly ShockFacts[], seen: Map<str
   const screened = screenAll(base, shocks);
   const judged = judgeAll(base, shocks);
   expect(screened).toHaveLength(shocks.length);
+  expect(sift(base, shocks)).toEqual({
+    judged: screened.flatMap((one, i) => (isJudged(one) ? [{ shock: shocks[i], judgement: one }] : [])),
+    refused: shocks.filter((_, i) => !isJudged(screened[i] as Judgement | Refusal)),
+  });
   shocks.forEach((shock, i) => {
     const one = judge({ ...base, shock });
     const quick = screened[i] as Judgement | Refusal;

@@ -110,6 +110,7 @@ export const exported: Readonly<Record<string, Complaints>> = {
   judge: judges((one) => [engine.judge(one, { full: true })]),
   judgeAll: judges((one) => engine.judgeAll(one, [one.shock])),
   screenAll: judges((one) => engine.screenAll(one, [one.shock]).filter(engine.isJudged)),
+  sift: judges((one) => engine.sift(one, [one.shock]).judged.map(({ judgement }) => judgement)),
   // Looks at whether there are answers.
   isJudged: readsNoFigure,
   fitsInstead: saysNone((one: FitQuestion) => engine.fitsInstead(one, told), refused),

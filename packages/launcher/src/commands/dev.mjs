@@ -4,7 +4,7 @@ import { setQuietStop } from '../lifecycle.mjs';
 import { inRoot } from '../paths.mjs';
 import { freePort } from '../ports.mjs';
 import { prepareBuild, prepareFolders, preparePackages } from '../preparation.mjs';
-import { launchWatching, startServer, untilItAnswers } from '../servers.mjs';
+import { apiMemory, launchWatching, startServer, untilItAnswers } from '../servers.mjs';
 import { apiEnvironment, loadEnvFile, portIn } from '../settings.mjs';
 import { startStandIns } from '../stack.mjs';
 import { program } from '../testing/runners.mjs';
@@ -16,7 +16,7 @@ function restartingApi(env) {
   let work = Promise.resolve();
   const restart = async () => {
     await server?.stop();
-    server = startServer('api', 'apps/api/dist/main.js', env, { vital: false, show: true });
+    server = startServer('api', 'apps/api/dist/main.js', env, { vital: false, show: true, node: apiMemory });
     try {
       await untilItAnswers(server, `http://127.0.0.1:${env.PORT}/health/ready`);
       console.log(`API ready on port ${env.PORT}`);

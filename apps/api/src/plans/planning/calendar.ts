@@ -1,5 +1,7 @@
 import { Temporal } from 'temporal-polyfill';
 
+import { Remembered } from './remembered.js';
+
 /** When a workshop works; all days and times of day are meant in its own zone. */
 export interface WorkshopCalendar {
   timeZone: string;
@@ -26,8 +28,17 @@ const toDate = (zoned: Temporal.ZonedDateTime): Date => new Date(zoned.epochMill
  * The spans in which the workshop is open on one day, earliest first; none when it is closed.
  * Times of day that a clock change skips or repeats resolve as Temporal's "compatible" rule does.
  */
-export function openSpans(calendar: WorkshopCalendar, day: Temporal.PlainDate): Span[] {
+export function openSpans(calendar: WorkshopCalendar, day: Temporal.PlainDate): readonly Span[] {
   const iso = day.toString();
+  const { timeZone, hours, closures } = calendar;
+  return spans.of(`${iso} ${timeZone} ${JSON.stringify([hours, closures])}`, () =>
+    spansOn(calendar, day, iso),
+  );
+}
+
+const spans = new Remembered<readonly Span[]>(5000);
+
+function spansOn(calendar: WorkshopCalendar, day: Temporal.PlainDate, iso: string): Span[] {
   if (calendar.closures.some((closure) => closure.firstDay <= iso && iso <= closure.lastDay)) return [];
   return calendar.hours
     .filter((hours) => hours.weekday === day.dayOfWeek)
