@@ -29,13 +29,18 @@ const bodyOf = ({ body }: Instant, style = {}): Shape => outline('body', body.ma
 const partsOf = ({ moving }: Instant, style = {}): Shape[] =>
   moving.map(({ name, polygon }) => outline(name, polygon.map(flip), 2, style));
 
+function linkEyeOf({ linkEye }: Instant, style = {}): Shape {
+  const [x, y] = flip(linkEye);
+  return circle('link-eye', x, y, eyeMm, style);
+}
+
 /** Eyes and axis of the shock at one travel. */
-function axisOf({ frameEye, linkEye }: Instant): Shape[] {
-  const [a, b] = [flip(frameEye), flip(linkEye)];
+function axisOf(instant: Instant): Shape[] {
+  const [a, b] = [flip(instant.frameEye), flip(instant.linkEye)];
   return [
     line('axis', a[0], a[1], b[0], b[1], { line: 'chain' }),
     circle('frame-eye', a[0], a[1], eyeMm),
-    circle('link-eye', b[0], b[1], eyeMm),
+    linkEyeOf(instant),
   ];
 }
 
@@ -95,7 +100,9 @@ export function SweepDrawing({ view, position }: SweepDrawingProps) {
       <Shapes
         shapes={view.fixed.map(({ name, polygon }) => outline(name, polygon.map(flip), 2, { fill: 'none' }))}
       />
-      <Shapes shapes={others.flatMap((one) => [...partsOf(one, ghost), bodyOf(one, ghost)])} />
+      <Shapes
+        shapes={others.flatMap((one) => [...partsOf(one, ghost), bodyOf(one, ghost), linkEyeOf(one, ghost)])}
+      />
       {tightest ? (
         <>
           <Shapes shapes={partsOf(tightest)} />
@@ -154,7 +161,7 @@ function Tight({ from, to, mm }: { from: Point; to: Point; mm: number }) {
           textAnchor={Math.abs(along[1]) < 0.4 ? 'middle' : 'start'}
           dominantBaseline={Math.abs(along[1]) < 0.4 ? 'auto' : 'central'}
           fill={colour}
-          style={{ ...unscaled, fontSize: '19px', fontWeight: 800, fontVariantNumeric: 'tabular-nums' }}
+          style={{ ...unscaled, fontSize: '17px', fontWeight: 800, fontVariantNumeric: 'tabular-nums' }}
           {...halo}
         >
           {mm > 0 ? `${formatFigure(mm, 1)} mm` : 'touches'}

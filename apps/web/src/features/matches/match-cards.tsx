@@ -5,6 +5,7 @@ import { formatDayShort } from '../../lib/format-date';
 import { formatMoney } from '../../lib/format-money';
 import { CellText } from './cell';
 import { GroupHead, Name, priceOf, verdictOrder, type RowsProps } from './match-groups';
+import { ViewLinks } from './view-links';
 
 /** Narrow: each shock a card with its drawing and only what deviates. */
 export function MatchCards({ view, sheet }: RowsProps) {
@@ -51,6 +52,7 @@ function Card({ row, view, sheet }: { row: MatchRow } & RowsProps) {
           <chakra.p color="slate" fontSize="sm">
             {row.sizeKey} mm, {row.spring}, {row.massG} g
           </chakra.p>
+          <ViewLinks row={row} />
         </div>
         <chakra.p textAlign="right" whiteSpace="nowrap">
           <chakra.span fontWeight="heavy" fontSize="lg">

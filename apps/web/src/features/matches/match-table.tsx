@@ -5,6 +5,7 @@ import { formatDayShort } from '../../lib/format-date';
 import { formatMoney } from '../../lib/format-money';
 import { CellText } from './cell';
 import { GroupHead, Name, priceOf, verdictOrder, type RowsProps } from './match-groups';
+import { ViewLinks } from './view-links';
 
 const Head = chakra('th', {
   base: {
@@ -127,6 +128,7 @@ function Row({ row, view, sheet }: { row: MatchRow } & RowsProps) {
           <chakra.span display="block" color="slate" fontSize="sm">
             {row.spring}, {row.massG} g
           </chakra.span>
+          <ViewLinks row={row} />
         </Cell>
         <Cell>
           <chakra.span whiteSpace="nowrap">
