@@ -39,7 +39,7 @@ const columns = [
 function subPrice({ price, verdict }: MatchRow): string {
   if (verdict === 'wont-fit') return '';
   if (price.fittedMinor === null) return price.partsMinor === null ? 'sold out' : 'parts only';
-  return price.selfFitMinor === null ? 'workshop only' : `${formatMoney(price.selfFitMinor)} self-fit`;
+  return price.selfFitMinor === null ? 'workshop only' : `${formatMoney(price.selfFitMinor)} self\u2011fit`;
 }
 
 /** Wide: a specification table, the rider's own shock on top, its outline grey behind every candidate. */

@@ -24,6 +24,9 @@ const Word = chakra('select', {
   },
 });
 
+/** A word and the comma behind it. */
+const Together = chakra('span', { base: { whiteSpace: 'nowrap' } });
+
 const budgets = [30000, 40000, 50000, 60000, 70000, 80000, 100000];
 
 interface SentenceProps {
@@ -41,27 +44,35 @@ export function Sentence({ view, onChange }: SentenceProps) {
   return (
     <chakra.div fontSize="lg" color="slate" marginBottom="6" lineHeight="text">
       Showing{' '}
-      <Word aria-label="Spring" value={applied.spring} onChange={pick('spring')}>
-        <option value="either">air and coil</option>
-        <option value="air">air only</option>
-        <option value="coil">coil only</option>
-      </Word>
-      ,{' '}
-      <Word aria-label="Reservoir" value={applied.reservoir} onChange={pick('reservoir')}>
-        <option value="either">with or without reservoir</option>
-        <option value="with">with a reservoir</option>
-        <option value="without">inline only</option>
-      </Word>
-      , at{' '}
-      <Word aria-label="Price at most" value={applied.maxMinor ?? ''} onChange={pick('maxMinor')}>
-        <option value="1000000">any price</option>
-        {amounts.map((amount) => (
-          <option key={amount} value={amount}>
-            up to {formatMoney(amount)}
-          </option>
-        ))}
-      </Word>
-      , for{' '}
+      <Together>
+        <Word aria-label="Spring" value={applied.spring} onChange={pick('spring')}>
+          <option value="either">air and coil</option>
+          <option value="air">air only</option>
+          <option value="coil">coil only</option>
+        </Word>
+        ,
+      </Together>{' '}
+      <Together>
+        <Word aria-label="Reservoir" value={applied.reservoir} onChange={pick('reservoir')}>
+          <option value="either">with or without reservoir</option>
+          <option value="with">with a reservoir</option>
+          <option value="without">inline only</option>
+        </Word>
+        ,
+      </Together>{' '}
+      at{' '}
+      <Together>
+        <Word aria-label="Price at most" value={applied.maxMinor ?? ''} onChange={pick('maxMinor')}>
+          <option value="1000000">any price</option>
+          {amounts.map((amount) => (
+            <option key={amount} value={amount}>
+              up to {formatMoney(amount)}
+            </option>
+          ))}
+        </Word>
+        ,
+      </Together>{' '}
+      for{' '}
       <TextLink
         to={`/measure-up/${measureUpId}/weight`}
         display="inline-flex"
@@ -80,17 +91,22 @@ export function Sentence({ view, onChange }: SentenceProps) {
         {rider.sagWindow ? `${rider.sagWindow} sag` : 'a sag not chosen'}
       </TextLink>
       ,{' '}
-      <Word aria-label="Order" value={applied.order} onChange={pick('order')}>
-        <option value="cheapest">cheapest first</option>
-        <option value="earliest">earliest first</option>
-        <option value="lightest">lightest first</option>
-      </Word>
-      . {counts['wont-fit']} that won’t fit are{' '}
-      <Word aria-label="Shocks that won’t fit" value={applied.wontFit} onChange={pick('wontFit')}>
-        <option value="hidden">hidden</option>
-        <option value="shown">shown</option>
-      </Word>
-      .
+      <Together>
+        <Word aria-label="Order" value={applied.order} onChange={pick('order')}>
+          <option value="cheapest">cheapest first</option>
+          <option value="earliest">earliest first</option>
+          <option value="lightest">lightest first</option>
+        </Word>
+        .
+      </Together>{' '}
+      {counts['wont-fit']} that won’t fit are{' '}
+      <Together>
+        <Word aria-label="Shocks that won’t fit" value={applied.wontFit} onChange={pick('wontFit')}>
+          <option value="hidden">hidden</option>
+          <option value="shown">shown</option>
+        </Word>
+        .
+      </Together>
     </chakra.div>
   );
 }
