@@ -6,6 +6,7 @@ export * from './sizing/sizes.js';
 export * from './sizing/resolve-size.js';
 export * from './messages/tell.js';
 export { reasonCodes, type ReasonCode } from './messages/reason-codes.js';
+export { contradictsSheet, listedFor } from './rules/contradicts-sheet.js';
 export { factsRead } from './rules/facts-read.js';
 export { torqueSlipRange } from './springs/torque.js';
 export * from './units/factors.js';

@@ -29,7 +29,7 @@ export class CurvesService {
   /** @param presentId the shock that the rider has now, where it is in our list; another id counts as none */
   async curves(measureUpId: string, sizeId: string, presentId: string | null): Promise<CurvesView> {
     const { open, shock, judgement, entry } = await this.judging.judgeOne(measureUpId, sizeId);
-    const { side, sheet } = open;
+    const { side } = open;
     const { frame, present, rider } = side;
     const load = riderLoad(rider, frame.sagTargetPercent?.value ?? null);
     const notDrawn: string[] = load ? [] : [notDrawnWords.rider];
@@ -41,7 +41,7 @@ export class CurvesService {
     if (!next) notDrawn.push(fits ? notDrawnWords.frame(shock) : notDrawnWords.size(shock));
     else if (!next.view.spring && load) notDrawn.push(notDrawnWords.spring(shock));
 
-    const size = sizeResult(side, sheet);
+    const size = sizeResult(side);
     const key = size.state === 'settled' ? size.sizeKey : null;
     const listed = frame.entries.flatMap((one) => one.sizeKey ?? []);
     const { shocks } = await this.catalogue.snapshot();

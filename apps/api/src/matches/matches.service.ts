@@ -158,8 +158,8 @@ function sheetNote({ sheet, side }: OpenMeasureUp): string {
 }
 
 function own(open: OpenMeasureUp): MatchesView['own'] {
-  const { side, sheet } = open;
-  const size = sizeResult(side, sheet);
+  const { side } = open;
+  const size = sizeResult(side);
   const drawing = presentDrawing(side, size);
   if (!drawing) return null;
   const { present } = side;

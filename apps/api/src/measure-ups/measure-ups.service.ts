@@ -6,7 +6,7 @@ import {
   type QuestionKey,
   type StoredAnswer,
 } from '@linkfell/contracts';
-import { findSizeKey } from '@linkfell/fit-engine';
+import { contradictsSheet, findSizeKey, mountFamily } from '@linkfell/fit-engine';
 import { Inject, Injectable } from '@nestjs/common';
 import { DataSource, IsNull, type EntityManager } from 'typeorm';
 
@@ -27,7 +27,7 @@ import { MeasureUpAnswer } from './measure-up-answer.entity.js';
 import { MeasureUpLink } from './measure-up-link.entity.js';
 import { MeasureUp } from './measure-up.entity.js';
 import { MeasureUpsException } from './measure-ups.exception.js';
-import { contradictsSheet, mountFamily, presentDrawing, sizeResult, sizeView } from './size-view.js';
+import { presentDrawing, sizeResult, sizeView } from './size-view.js';
 
 /** A measure-up with all that follows from it. */
 export interface OpenMeasureUp {
@@ -73,8 +73,8 @@ export class MeasureUpsService {
 
   async view(id: string): Promise<MeasureUpView> {
     const { revision, createdAt, updatedAt, answers, sheet, side } = await this.open(id);
-    const size = sizeResult(side, sheet);
-    const questions = askedQuestions(answers, sheet, contradictsSheet(size, sheet));
+    const size = sizeResult(side);
+    const questions = askedQuestions(answers, sheet, contradictsSheet(side.frame, side.rider, size));
     const frame = known(answers, 'frame');
     return {
       id,
@@ -86,7 +86,7 @@ export class MeasureUpsService {
       next: questions.find((question) => question.state === 'open')?.key ?? null,
       title: titleOf(frame, sheet),
       sheet: sheet && sheetView(sheet),
-      size: sizeView(size, sheet, mountFamily(side)),
+      size: sizeView(size, sheet, mountFamily(side.frame, side.present)),
       drawing: presentDrawing(side, size),
       readyForMatches: readyForMatches(questions),
     };

@@ -1,31 +1,13 @@
 import type { DrawnShock, SizeView } from '@linkfell/contracts';
-import { resolveSize, sizeOf, tellSize, type SizeResult } from '@linkfell/fit-engine';
+import { presentSize, sizeOf, tellSize, type SizeResult } from '@linkfell/fit-engine';
 
 import type { FrameSheetData } from '../frames/sheet.js';
 import type { RiderSide } from './facts-from-answers.js';
 
-/** Which family of sizes the present shock's mounts belong to, as far as is known. */
-export function mountFamily(side: RiderSide): 'eyelet' | 'trunnion' | null {
-  const kinds = [side.present.bodyEndKind, side.present.shaftEndKind];
-  if (kinds.includes('trunnion')) return 'trunnion';
-  if (kinds[0] && kinds[1]) return 'eyelet';
-  const ends = side.frame.entries.flatMap((entry) => [entry.frameEnd, entry.linkEnd]);
-  if (ends.some((end) => end?.mount.kind === 'trunnion')) return 'trunnion';
-  return ends.length > 0 && ends.every((end) => end !== null) ? 'eyelet' : null;
-}
-
-export function sizeResult(side: RiderSide, sheet: FrameSheetData | null): SizeResult {
-  const published = sheet ? [...new Set(sheet.entries.map((entry) => entry.sizeKey))] : null;
-  return resolveSize(side.present, published, mountFamily(side));
-}
+/** What the engine makes of the present shock, the same as it judges by. */
+export const sizeResult = ({ frame, present }: RiderSide): SizeResult => presentSize(frame, present);
 
 const questionOfReading = { eyeToEye: 'eye-to-eye', compressed: 'stroke', shaftTravel: 'stroke' } as const;
-
-/** Whether the present shock is settled on a size that the sheet does not list. */
-export const contradictsSheet = (size: SizeResult, sheet: FrameSheetData | null): boolean =>
-  sheet !== null &&
-  size.state === 'settled' &&
-  !sheet.entries.some((entry) => entry.sizeKey === size.sizeKey);
 
 /** What the resolver makes of the readings so far, in words and figures. */
 export function sizeView(

@@ -48,7 +48,7 @@ const tools = (judgement: Judgement): string[] => [
 export function jobSnapshot(judged: Judged, open: OpenMeasureUp, workshop: WorkshopDay | null): JobSnapshot {
   const { shock, judgement, entry } = judged;
   const { rider, frame, present } = open.side;
-  const old = presentDrawing(open.side, sizeResult(open.side, open.sheet));
+  const old = presentDrawing(open.side, sizeResult(open.side));
   const { spring } = judgement;
   return {
     bike: open.sheet ? frameName(open.sheet) + (rider.modelYear ? `, ${rider.modelYear}` : '') : frame.name,

@@ -4,9 +4,39 @@ import { aFrame, aQuestion, aShock, fact } from '../../test/judging/questions.js
 import type { CheckId } from '../answers.js';
 import type { FitQuestion } from '../facts.js';
 import { judge } from '../judge.js';
+import { presentSize } from '../sizing/present-size.js';
+import { contradictsSheet } from './contradicts-sheet.js';
 
 const codeOf = (check: CheckId, over: Partial<FitQuestion>): string | undefined =>
   judge(aQuestion(over), { full: true }).answers.find((given) => given.check === check)?.code;
+
+describe('a reading against the sheet', () => {
+  const { frame, rider, present } = aQuestion();
+  const [entry] = frame.entries;
+  if (!entry) throw new Error('the frame has no entry');
+  const other = entry.sizeKey === '210x55' ? '210x50' : '210x55';
+  const twoChips = {
+    ...frame,
+    entries: [
+      { ...entry, chip: 'low' },
+      { ...entry, id: 'high', sizeKey: other, chip: 'high' },
+    ],
+  };
+  const settled = presentSize(frame, { ...present, printedSizeKey: other });
+
+  it('counts only what the sheet lists for the chip that the rider has', () => {
+    expect(settled).toMatchObject({ state: 'settled', sizeKey: other });
+    expect(contradictsSheet(twoChips, { ...rider, chip: 'low' }, settled)).toBe(true);
+    expect(contradictsSheet(twoChips, { ...rider, chip: 'high' }, settled)).toBe(false);
+    expect(contradictsSheet(twoChips, { ...rider, chip: null }, settled)).toBe(false);
+  });
+
+  it('never speaks against a frame that the rider has described', () => {
+    expect(contradictsSheet({ ...twoChips, origin: 'described' }, { ...rider, chip: 'low' }, settled)).toBe(
+      false,
+    );
+  });
+});
 
 describe('e-bikes and notices', () => {
   it.each([

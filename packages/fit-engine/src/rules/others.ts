@@ -1,5 +1,5 @@
 import type { CheckAnswer } from '../answers.js';
-import { sizeOf } from '../sizing/sizes.js';
+import { contradictsSheet, listedFor } from './contradicts-sheet.js';
 import { answer, figure, riderSaid, type Trial } from './context.js';
 
 /** Makers' rules on which end goes where. */
@@ -54,13 +54,8 @@ export function noticesCheck({ frame, shock }: Trial): CheckAnswer {
  */
 export function readingConflictCheck({ frame, rider, shared }: Trial): CheckAnswer {
   const { size } = shared;
-  const speaking = frame.entries.filter((entry) => shared.applies.get(entry)?.state !== 'no');
-  const listed = (speaking.length > 0 ? speaking : frame.entries).map(({ sizeKey }) =>
-    sizeKey === null ? null : (sizeOf(sizeKey)?.key ?? sizeKey),
-  );
-  if (frame.origin === 'described' || size.state !== 'settled' || listed.includes(size.sizeKey)) {
-    return answer('reading-conflict', 'pass', 'reading-no-conflict');
-  }
+  if (!contradictsSheet(frame, rider, size)) return answer('reading-conflict', 'pass', 'reading-no-conflict');
+  const listed = listedFor(frame, rider);
   const figures = [
     figure('present.size', size.sizeKey, null, riderSaid),
     figure('frame.size', [...new Set(listed)].join(', '), null, frame.entries[0]?.source ?? riderSaid),

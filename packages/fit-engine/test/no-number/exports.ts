@@ -133,6 +133,9 @@ export const exported: Readonly<Record<string, Complaints>> = {
     (by) => engine.resolveSize(aPresentShock({ eyeToEye: open, compressed: reading(by) }), null, null),
     () => engine.resolveSize(aPresentShock({ eyeToEye: open }), null, null),
   ),
+  // Compare keys of sizes.
+  contradictsSheet: readsNoFigure,
+  listedFor: readsNoFigure,
   presentSize: asIfUntold(
     (by) => engine.presentSize(question.frame, aPresentShock({ eyeToEye: open, shaftTravel: reading(by) })),
     () => engine.presentSize(question.frame, aPresentShock({ eyeToEye: open })),
