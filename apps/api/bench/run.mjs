@@ -47,11 +47,11 @@ const matchesOf = (riders) =>
     headers: { cookie },
   }));
 
-/** One server at a time is under load, each warmed by a tenth of the requests first. */
-async function measured(start, requests) {
+/** One server at a time is under load, each warmed by requests of its own first. */
+async function measured(start, warming, requests) {
   const server = await start();
   try {
-    await underLoad(server.url, requests.slice(0, Math.ceil(requests.length / 10)), { pid: server.pid });
+    await underLoad(server.url, warming, { pid: server.pid });
     return await underLoad(server.url, requests, { pid: server.pid });
   } finally {
     await server.stop();
@@ -68,8 +68,9 @@ async function judgedFor(startApi, riders) {
         headers: { cookie },
       });
       const { counts } = await answer.json();
-      judged += Object.values(counts).reduce((a, b) => a + b, 0);
-      mayFit += judged === 0 ? 0 : Object.values(counts).reduce((a, b) => a + b, 0) - counts['wont-fit'];
+      const all = Object.values(counts).reduce((a, b) => a + b, 0);
+      judged += all;
+      mayFit += all - counts['wont-fit'];
     }
     return { judged: Math.round(judged / riders.length), mayFit: Math.round(mayFit / riders.length) };
   } finally {
@@ -83,13 +84,14 @@ async function bench(client, databaseUrl, stripeUrl) {
   console.log(`\nThe API under load (${cpus().length} cores of ${cpus()[0]?.model ?? 'an unknown kind'})`);
   await fillFrames(client, size.sheets);
   await fillSizes(client, size.sizes);
-  const riders = await drawRiders(client, size.riders, secret);
+  const all = await drawRiders(client, size.riders + Math.ceil(size.riders / 10), secret);
+  const [riders, others] = [all.slice(0, size.riders), all.slice(size.riders)];
   await fillListings(client, size.listings / 10);
   const few = await counted(client);
-  const withFew = await measured(startApi, matchesOf(riders));
+  const withFew = await measured(startApi, matchesOf(others), matchesOf(riders));
   await fillListings(client, size.listings);
   const many = await counted(client);
-  const withMany = await measured(startApi, matchesOf(riders));
+  const withMany = await measured(startApi, matchesOf(others), matchesOf(riders));
   const { judged, mayFit } = await judgedFor(startApi, riders.slice(0, 50));
 
   const { rows } = await client.query('SELECT id FROM listings ORDER BY random() LIMIT $1', [size.riders]);
@@ -100,7 +102,7 @@ async function bench(client, databaseUrl, stripeUrl) {
   }));
   const startBare = () =>
     startServer('bare-route.mjs', `/listings/${rows[0].id}`, { DATABASE_URL: databaseUrl });
-  const bare = await measured(startBare, byKey);
+  const bare = await measured(startBare, byKey.slice(0, size.riders), byKey);
 
   console.log(
     `  catalogue       ${many.sheets} frame sheets, ${many.sizes} sizes, ${many.listings} listings; ${riders.length} riders, each asked once`,

@@ -24,7 +24,7 @@ export async function startServer(file, readyPath, env, nodeArguments = []) {
   });
   const stop = () =>
     new Promise((resolve) => {
-      if (server.exitCode !== null) return resolve();
+      if (server.exitCode !== null || server.signalCode !== null) return resolve();
       server.once('exit', resolve);
       server.kill('SIGTERM');
     });

@@ -79,8 +79,8 @@ test('the last slot: one rider gets it, the other is offered the next and pays f
   stack,
 }) => {
   await stack.sql(`UPDATE listings SET quantity = reserved + 9 WHERE item_id = $1`, [shock]);
-  // A workshop with one stand left: the same hour cannot be had twice.
-  const workshop = 'fendle-workshop';
+  // A workshop of its own for this test, with one stand left: the same hour cannot be had twice.
+  const workshop = 'thornrigg-bike-clinic';
   const [stand] = await stack.sql(`SELECT id FROM stands WHERE organisation_id = $1 ORDER BY id LIMIT 1`, [
     workshop,
   ]);

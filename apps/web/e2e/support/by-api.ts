@@ -11,7 +11,7 @@ const answers = {
   'remote-wish': { wants: false, acceptsExternal: null },
 };
 
-/** What a rider would have done on the way to a plan, done by the API with the rider's own session. */
+/** What a rider would have done, to the first free slot where a workshop is wanted, on the way to a plan, done by the API with the rider's own session. */
 export async function planByApi(
   request: APIRequestContext,
   sizeId: string,
@@ -29,6 +29,11 @@ export async function planByApi(
   const plan = await send<{ id: string; revision: number }>('post', `/api/measure-ups/${measureUpId}/plans`, {
     sizeId,
   });
-  await send('put', `/api/plans/${plan.id}/choices`, choices, { 'If-Match': `"${plan.revision}"` });
+  const choose = (wanted: object, revision: number) =>
+    send<{ revision: number; slots: { start: string }[] }>('put', `/api/plans/${plan.id}/choices`, wanted, {
+      'If-Match': `"${revision}"`,
+    });
+  const { revision, slots } = await choose(choices, plan.revision);
+  if ('workshopId' in choices) await choose({ slotStart: slots[0]?.start }, revision);
   return { planId: plan.id, measureUpId };
 }
