@@ -113,7 +113,7 @@ function SideBySide({ view }: { view: CurvesView }) {
     <chakra.section marginBottom="10" maxWidth="form">
       <FiguresTable
         caption="Side by side"
-        heads={['', ...sides.map(({ name }) => name)]}
+        heads={['Figure', ...sides.map(({ name }) => name)]}
         rows={[
           row('Travel, mm', ({ travelMm }) => formatFigure(travelMm, 0)),
           row('Mean leverage', ({ meanRatio }) => formatFigure(meanRatio, 2)),
