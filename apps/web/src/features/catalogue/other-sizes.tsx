@@ -1,30 +1,11 @@
 import type { ShockPage } from '@linkfell/contracts';
 import { chakra } from '@chakra-ui/react';
-import { Link } from 'react-router-dom';
 import { formatSize } from '../../lib/format-figure';
 import { formatMoney } from '../../lib/format-money';
 import { SizeBar, SizeScale } from './size-bar';
+import { SizeLinkRow } from './size-link-row';
 
 const columns = { base: 'minmax(0, 1fr) auto', md: '8.5rem minmax(0, 1fr) 8rem' };
-const Row = chakra(Link, {
-  base: {
-    display: 'grid',
-    gridTemplateColumns: columns,
-    columnGap: '6',
-    rowGap: '1',
-    alignItems: 'center',
-    minHeight: 'target',
-    paddingBlock: '2',
-    borderTopWidth: '1px',
-    borderColor: 'hair',
-    color: 'ink',
-    fontVariantNumeric: 'tabular-nums',
-    lineHeight: 'heading',
-    '& b': { textDecorationLine: 'underline', textDecorationColor: 'var(--lf-colors-rule)' },
-    _hover: { bg: 'wash', '& b': { textDecorationColor: 'var(--lf-colors-bracken)' } },
-  },
-});
-
 /** The same model in its other sizes, on the scale of all sizes. */
 export function OtherSizes({ page }: { page: ShockPage }) {
   const trunnion = page.drawing.bodyEnd.kind === 'trunnion';
@@ -40,7 +21,7 @@ export function OtherSizes({ page }: { page: ShockPage }) {
           const [eyeToEye, stroke] = sizeKey.split('x').map(Number);
           return (
             <li key={sizeId}>
-              <Row to={`/shocks/${sizeId}`}>
+              <SizeLinkRow gridTemplateColumns={columns} to={`/shocks/${sizeId}`}>
                 <span>
                   <chakra.b fontWeight="heavy" textUnderlineOffset="0.2em" textDecorationThickness="1px">
                     {formatSize(eyeToEye ?? eyeToEyeMm, stroke ?? strokeMm)}
@@ -64,7 +45,7 @@ export function OtherSizes({ page }: { page: ShockPage }) {
                     </>
                   )}
                 </chakra.span>
-              </Row>
+              </SizeLinkRow>
             </li>
           );
         })}

@@ -1,33 +1,14 @@
 import type { ShockSizeRow } from '@linkfell/contracts';
 import { chakra } from '@chakra-ui/react';
-import { Link } from 'react-router-dom';
 import { formatSize } from '../../lib/format-figure';
 import { formatMoney } from '../../lib/format-money';
 import { SizeBar, SizeScale } from './size-bar';
+import { SizeLinkRow } from './size-link-row';
 
 const columns = {
   base: 'minmax(0, 1fr) auto',
   md: '8.5rem minmax(0, 1fr) 6rem 7rem',
 };
-
-const Row = chakra(Link, {
-  base: {
-    display: 'grid',
-    gridTemplateColumns: columns,
-    columnGap: '6',
-    rowGap: '1',
-    alignItems: 'center',
-    minHeight: 'target',
-    paddingBlock: '2',
-    borderTopWidth: '1px',
-    borderColor: 'hair',
-    color: 'ink',
-    fontVariantNumeric: 'tabular-nums',
-    lineHeight: 'heading',
-    '& b': { textDecorationLine: 'underline', textDecorationColor: 'var(--lf-colors-rule)' },
-    _hover: { bg: 'wash', '& b': { textDecorationColor: 'var(--lf-colors-bracken)' } },
-  },
-});
 
 const families = {
   eyelet: 'Eyelet sizes',
@@ -103,7 +84,7 @@ function SizeRow({ row, search }: { row: ShockSizeRow; search: string }) {
   const { sizeKey, inches, family, eyeToEyeMm, strokeMm, shocks, fromMinor } = row;
   const [nominal, stroke] = sizeKey.split('x').map(Number);
   return (
-    <Row to={`/shocks/sizes/${sizeKey}${search}`}>
+    <SizeLinkRow gridTemplateColumns={columns} to={`/shocks/sizes/${sizeKey}${search}`}>
       <span>
         <chakra.b fontSize="lg" fontWeight="heavy" textUnderlineOffset="0.2em" textDecorationThickness="1px">
           {formatSize(nominal ?? eyeToEyeMm, stroke ?? strokeMm)}
@@ -135,6 +116,6 @@ function SizeRow({ row, search }: { row: ShockSizeRow; search: string }) {
           </>
         )}
       </chakra.span>
-    </Row>
+    </SizeLinkRow>
   );
 }
